@@ -1,0 +1,82 @@
+import { z } from 'zod'
+import { type Force, newtons, poundsForce, toPoundsForce } from '../units/force'
+import { inches, type Length, millimetres, nanometres, toInches, toMillimetres } from '../units/length'
+import { type Money, moneyFromMain, moneyToMain } from '../units/money'
+
+/** Longest length anything may state: 1 km. A larger figure is a slip of the finger. */
+const LONGEST = nanometres(1e12)
+
+/**
+ * How lengths, forces and money are written. One schema is built over this, once for the program's own
+ * units and once for each unit a survey file may use, so that reading, writing and publishing cannot drift.
+ */
+export interface Quantities {
+  /** Any length, negative too. */
+  length: z.ZodType<Length, number>
+  /** A length of zero or more. */
+  size: z.ZodType<Length, number>
+  /** A length above zero. */
+  positive: z.ZodType<Length, number>
+  /** A force above zero. */
+  force: z.ZodType<Force, number>
+  /** An amount of zero or more. */
+  price: z.ZodType<Money, number>
+}
+
+/** Gives a number schema the brand of its quantity; nothing changes at run time. */
+const branded = <Quantity extends number>(schema: z.ZodType<number, number>) =>
+  schema as unknown as z.ZodType<Quantity, number>
+
+/** The program's own units: whole nanometres, newtons, minor units of money. */
+export const storedQuantities: Quantities = {
+  length: branded<Length>(z.int().min(-LONGEST).max(LONGEST)),
+  size: branded<Length>(z.int().min(0).max(LONGEST)),
+  positive: branded<Length>(z.int().min(1).max(LONGEST)),
+  force: branded<Force>(z.number().positive().max(1e12)),
+  price: branded<Money>(z.int().nonnegative()),
+}
+
+interface FileUnits {
+  length: { name: string; read: (value: number) => Length; write: (length: Length) => number }
+  force: { name: string; read: (value: number) => Force; write: (force: Force) => number }
+}
+
+function fileQuantities({ length, force }: FileUnits): Quantities {
+  const longest = length.write(LONGEST)
+  const lengthCodec = (written: z.ZodNumber, description: string) =>
+    z.codec(written.meta({ description }), branded<Length>(z.int()), {
+      decode: (value) => length.read(value),
+      encode: (value) => length.write(value as Length),
+    })
+  return {
+    length: lengthCodec(z.number().min(-longest).max(longest), `length in ${length.name}`),
+    size: lengthCodec(z.number().min(0).max(longest), `length in ${length.name}, zero or more`),
+    positive: lengthCodec(z.number().positive().max(longest), `length in ${length.name}, above zero`),
+    force: z.codec(
+      z.number().positive().max(1e11).meta({ description: `force in ${force.name}` }),
+      branded<Force>(z.number()),
+      { decode: (value) => force.read(value), encode: (value) => force.write(value as Force) },
+    ),
+    price: z.codec(z.number().min(0).max(1e9).meta({ description: 'price in main units of money' }), branded<Money>(z.int()), {
+      decode: (value) => moneyFromMain(value),
+      encode: (value) => moneyToMain(value as Money),
+    }),
+  }
+}
+
+const lengthUnits = {
+  in: { name: 'inches', read: inches, write: (length: Length) => toInches(length) },
+  mm: { name: 'millimetres', read: millimetres, write: (length: Length) => toMillimetres(length) },
+}
+const forceUnits = {
+  lbf: { name: 'pounds-force', read: poundsForce, write: (force: Force) => toPoundsForce(force) },
+  N: { name: 'newtons', read: newtons, write: (force: Force) => force as number },
+}
+
+export const unitsSchema = z.strictObject({ length: z.enum(['in', 'mm']), force: z.enum(['lbf', 'N']) })
+/** The units a survey file is written in. */
+export type Units = z.infer<typeof unitsSchema>
+
+/** Quantities as a survey file in these units writes them. */
+export const quantitiesIn = (units: Units): Quantities =>
+  fileQuantities({ length: lengthUnits[units.length], force: forceUnits[units.force] })

@@ -1,0 +1,82 @@
+import { z } from 'zod'
+import { makeHardwareSchema } from './hardware'
+import { makeHouseRulesSchema } from './house-rules'
+import { type Quantities, quantitiesIn, storedQuantities, type Units, unitsSchema } from './quantities'
+import { makeSurveySchema } from './survey'
+
+/** The survey file: a survey, and the hardware and rules it is to be calculated with where they are not the starters. */
+export const makeSurveyFileSchema = (q: Quantities) =>
+  z
+    .strictObject({
+      survey: makeSurveySchema(q),
+      hardware: makeHardwareSchema(q).optional(),
+      rules: makeHouseRulesSchema(q).optional(),
+    })
+    .superRefine(({ survey, hardware }, context) => {
+      if (!hardware) return
+      const cables = new Set(hardware.cables.map((cable) => cable.id))
+      survey.runs.forEach((run, i) => {
+        if (cables.has(run.cable)) return
+        const path = ['survey', 'runs', i, 'cable']
+        context.addIssue({ code: 'custom', path, input: run.cable, message: 'expected the id of a cable of the hardware' })
+      })
+    })
+
+export type SurveyFile = z.infer<ReturnType<typeof makeSurveyFileSchema>>
+
+const unitsOnly = z.object({ survey: z.object({ units: unitsSchema }) })
+
+export class SurveyFileError extends Error {
+  /** One sentence per fault: path, value, what was expected. */
+  constructor(readonly faults: string[]) {
+    super(faults.join('\n'))
+    this.name = 'SurveyFileError'
+  }
+}
+
+/** Reads a parsed survey file in its own units. @throws SurveyFileError naming path, value and expectation of every fault. */
+export function readSurveyFile(input: unknown): SurveyFile {
+  const units = unitsOnly.safeParse(input)
+  if (!units.success) throw new SurveyFileError(units.error.issues.map((issue) => describeIssue(issue, input)))
+  const parsed = makeSurveyFileSchema(quantitiesIn(units.data.survey.units)).safeParse(input)
+  if (!parsed.success) throw new SurveyFileError(parsed.error.issues.flatMap((issue) => describeIssue(issue, input)))
+  return parsed.data
+}
+
+/** Writes a survey file in the units its survey names; the inverse of `readSurveyFile`. */
+export const writeSurveyFile = (file: SurveyFile): unknown =>
+  z.encode(makeSurveyFileSchema(quantitiesIn(file.survey.units)), file)
+
+/** The survey file as JSON Schema (2020-12), for files in these units. */
+export const surveyFileJsonSchema = (units: Units): unknown =>
+  z.toJSONSchema(makeSurveyFileSchema(quantitiesIn(units)), { io: 'input' })
+
+/** The same document in the program's own units, for what is stored and sent. */
+export const storedSurveyFileSchema = makeSurveyFileSchema(storedQuantities)
+
+/** One fault as a sentence: the path, the value found there and what was expected. */
+export function describeIssue(issue: z.core.$ZodIssue, input: unknown): string {
+  const path = issue.path.length > 0 ? formatPath(issue.path) : 'the file'
+  if (issue.code === 'unrecognized_keys') {
+    return issue.keys.map((key) => `${formatPath([...issue.path, key])}: unknown key; remove it or correct its name`).join('\n')
+  }
+  return `${path}: found ${showValue(valueAt(input, issue.path))}, ${issue.message.replace(/^Invalid [a-z]+: /, '')}`
+}
+
+const formatPath = (path: PropertyKey[]): string =>
+  path.map((part, i) => (typeof part === 'number' ? `[${part}]` : `${i > 0 ? '.' : ''}${String(part)}`)).join('')
+
+function valueAt(input: unknown, path: PropertyKey[]): unknown {
+  let value = input
+  for (const part of path) {
+    if (typeof value !== 'object' || value === null) return undefined
+    value = (value as Record<PropertyKey, unknown>)[part]
+  }
+  return value
+}
+
+function showValue(value: unknown): string {
+  if (value === undefined) return 'nothing'
+  const text = JSON.stringify(value)
+  return text.length > 60 ? `${text.slice(0, 57)}…` : text
+}
