@@ -53,14 +53,22 @@ function fileQuantities({ length, force }: FileUnits): Quantities {
     size: lengthCodec(z.number().min(0).max(longest), `length in ${length.name}, zero or more`),
     positive: lengthCodec(z.number().positive().max(longest), `length in ${length.name}, above zero`),
     force: z.codec(
-      z.number().positive().max(1e11).meta({ description: `force in ${force.name}` }),
+      z
+        .number()
+        .positive()
+        .max(1e11)
+        .meta({ description: `force in ${force.name}` }),
       branded<Force>(z.number()),
       { decode: (value) => force.read(value), encode: (value) => force.write(value as Force) },
     ),
-    price: z.codec(z.number().min(0).max(1e9).meta({ description: 'price in main units of money' }), branded<Money>(z.int()), {
-      decode: (value) => moneyFromMain(value),
-      encode: (value) => moneyToMain(value as Money),
-    }),
+    price: z.codec(
+      z.number().min(0).max(1e9).meta({ description: 'price in main units of money' }),
+      branded<Money>(z.int()),
+      {
+        decode: (value) => moneyFromMain(value),
+        encode: (value) => moneyToMain(value as Money),
+      },
+    ),
   }
 }
 

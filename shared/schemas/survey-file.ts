@@ -18,7 +18,12 @@ export const makeSurveyFileSchema = (q: Quantities) =>
       survey.runs.forEach((run, i) => {
         if (cables.has(run.cable)) return
         const path = ['survey', 'runs', i, 'cable']
-        context.addIssue({ code: 'custom', path, input: run.cable, message: 'expected the id of a cable of the hardware' })
+        context.addIssue({
+          code: 'custom',
+          path,
+          input: run.cable,
+          message: 'expected the id of a cable of the hardware',
+        })
       })
     })
 
@@ -37,9 +42,11 @@ export class SurveyFileError extends Error {
 /** Reads a parsed survey file in its own units. @throws SurveyFileError naming path, value and expectation of every fault. */
 export function readSurveyFile(input: unknown): SurveyFile {
   const units = unitsOnly.safeParse(input)
-  if (!units.success) throw new SurveyFileError(units.error.issues.map((issue) => describeIssue(issue, input)))
+  if (!units.success)
+    throw new SurveyFileError(units.error.issues.map((issue) => describeIssue(issue, input)))
   const parsed = makeSurveyFileSchema(quantitiesIn(units.data.survey.units)).safeParse(input)
-  if (!parsed.success) throw new SurveyFileError(parsed.error.issues.flatMap((issue) => describeIssue(issue, input)))
+  if (!parsed.success)
+    throw new SurveyFileError(parsed.error.issues.flatMap((issue) => describeIssue(issue, input)))
   return parsed.data
 }
 
@@ -58,13 +65,17 @@ export const storedSurveyFileSchema = makeSurveyFileSchema(storedQuantities)
 export function describeIssue(issue: z.core.$ZodIssue, input: unknown): string {
   const path = issue.path.length > 0 ? formatPath(issue.path) : 'the file'
   if (issue.code === 'unrecognized_keys') {
-    return issue.keys.map((key) => `${formatPath([...issue.path, key])}: unknown key; remove it or correct its name`).join('\n')
+    return issue.keys
+      .map((key) => `${formatPath([...issue.path, key])}: unknown key; remove it or correct its name`)
+      .join('\n')
   }
   return `${path}: found ${showValue(valueAt(input, issue.path))}, ${issue.message.replace(/^Invalid [a-z]+: /, '')}`
 }
 
 const formatPath = (path: PropertyKey[]): string =>
-  path.map((part, i) => (typeof part === 'number' ? `[${part}]` : `${i > 0 ? '.' : ''}${String(part)}`)).join('')
+  path
+    .map((part, i) => (typeof part === 'number' ? `[${part}]` : `${i > 0 ? '.' : ''}${String(part)}`))
+    .join('')
 
 function valueAt(input: unknown, path: PropertyKey[]): unknown {
   let value = input

@@ -15,7 +15,8 @@ type Report = (path: Path, value: unknown, message: string) => void
 /** Checks that ids are unique, that every name leads somewhere and that a run's bays follow one another. */
 export function checkSurveyReferences(survey: Names, context: z.RefinementCtx): void {
   const report: Report = (path, input, message) => context.addIssue({ code: 'custom', path, input, message })
-  for (const list of ['posts', 'bays', 'runs', 'diagonals', 'photos'] as const) checkUnique(survey[list], [list], report)
+  for (const list of ['posts', 'bays', 'runs', 'diagonals', 'photos'] as const)
+    checkUnique(survey[list], [list], report)
   const posts = new Set(survey.posts.map((post) => post.id))
   const needPost = (id: string, path: Path) => {
     if (!posts.has(id)) report(path, id, 'expected the id of a post of this survey')
