@@ -6,15 +6,40 @@ import globals from 'globals'
 import tseslint from 'typescript-eslint'
 
 /** Packages that may appear only in the folders named. */
-const restrict = (files: string[], patterns: { group: string[]; message: string }[], ignores: string[] = []) => ({
+const restrict = (
+  files: string[],
+  patterns: { group: string[]; message: string }[],
+  ignores: string[] = [],
+) => ({
   files,
   ignores,
-  rules: { '@typescript-eslint/no-restricted-imports': ['error', { patterns }] as const },
+  rules: { '@typescript-eslint/no-restricted-imports': ['error', { patterns }] as ['error', object] },
 })
 
-const ui = ['react', 'react/*', 'react-dom', 'react-dom/*', 'react-router-dom', '@tanstack/*', 'konva', 'konva/*', 'react-konva']
+const ui = [
+  'react',
+  'react/*',
+  'react-dom',
+  'react-dom/*',
+  'react-router-dom',
+  '@tanstack/*',
+  'konva',
+  'konva/*',
+  'react-konva',
+]
 const sharedOutside = {
-  group: [...ui, 'express', 'express-*', 'drizzle-orm', 'drizzle-orm/*', 'postgres', 'node:*', 'pino', 'sharp', 'exceljs'],
+  group: [
+    ...ui,
+    'express',
+    'express-*',
+    'drizzle-orm',
+    'drizzle-orm/*',
+    'postgres',
+    'node:*',
+    'pino',
+    'sharp',
+    'exceljs',
+  ],
   message: 'shared is pure TypeScript: no React, Express, database, clock, random or network.',
 }
 const konva = { group: ['konva', 'konva/*', 'react-konva'], message: 'Konva stops at survey-editor/canvas.' }
@@ -23,7 +48,10 @@ const react = {
   message: 'React never enters the editor’s model or tools.',
 }
 const express = { group: ['express', 'express-*'], message: 'Express stops at app.ts, http and *.routes.ts.' }
-const drizzle = { group: ['drizzle-orm', 'drizzle-orm/*', 'postgres'], message: 'Drizzle stops at database and *.queries.ts.' }
+const drizzle = {
+  group: ['drizzle-orm', 'drizzle-orm/*', 'postgres'],
+  message: 'Drizzle stops at database and *.queries.ts.',
+}
 
 const here = new URL('.', import.meta.url).pathname
 /** Zones: `target` may not import `from`. The order of shared is units, geometry, schemas, permissions and endpoints, survey, calculation, cut-list. */
@@ -44,7 +72,9 @@ export default tseslint.config(
       parserOptions: { projectService: { allowDefaultProject: ['scripts/*.mjs'] }, tsconfigRootDir: here },
     },
     plugins: { 'import-x': importX },
-    settings: { 'import-x/resolver-next': [createTypeScriptImportResolver({ project: `${here}tsconfig.json` })] },
+    settings: {
+      'import-x/resolver-next': [createTypeScriptImportResolver({ project: `${here}tsconfig.json` })],
+    },
     rules: {
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/no-non-null-assertion': 'error',
@@ -60,11 +90,27 @@ export default tseslint.config(
             zone('shared', ['server', 'src', 'tests', 'e2e', 'scripts'], 'shared imports only itself.'),
             zone('server', ['src', 'tests', 'e2e', 'scripts'], 'server imports shared, never src.'),
             zone('src', ['server', 'tests', 'e2e', 'scripts'], 'src imports shared, never server.'),
-            zone('shared/units', ['shared/geometry', 'shared/schemas', 'shared/permissions', 'shared/endpoints', ...later], 'units come first.'),
-            zone('shared/geometry', ['shared/schemas', 'shared/permissions', 'shared/endpoints', ...later], 'geometry knows only units.'),
-            zone('shared/schemas', ['shared/permissions', 'shared/endpoints', ...later], 'schemas know only units and geometry.'),
+            zone(
+              'shared/units',
+              ['shared/geometry', 'shared/schemas', 'shared/permissions', 'shared/endpoints', ...later],
+              'units come first.',
+            ),
+            zone(
+              'shared/geometry',
+              ['shared/schemas', 'shared/permissions', 'shared/endpoints', ...later],
+              'geometry knows only units.',
+            ),
+            zone(
+              'shared/schemas',
+              ['shared/permissions', 'shared/endpoints', ...later],
+              'schemas know only units and geometry.',
+            ),
             zone('shared/permissions', ['shared/endpoints', ...later], 'permissions know only schemas.'),
-            zone('shared/survey', ['shared/calculation', 'shared/cut-list'], 'survey comes before calculation.'),
+            zone(
+              'shared/survey',
+              ['shared/calculation', 'shared/cut-list'],
+              'survey comes before calculation.',
+            ),
             zone('shared/calculation', ['shared/cut-list'], 'calculation comes before cut-list.'),
           ],
         },
@@ -72,11 +118,23 @@ export default tseslint.config(
     },
   },
   restrict(['shared/**/*.ts'], [sharedOutside]),
-  restrict(['src/**/*.{ts,tsx}'], [konva], ['src/features/survey-editor/canvas/**', 'src/features/survey-editor/{model,tools}/**']),
+  restrict(
+    ['src/**/*.{ts,tsx}'],
+    [konva],
+    ['src/features/survey-editor/canvas/**', 'src/features/survey-editor/{model,tools}/**'],
+  ),
   restrict(['src/features/survey-editor/{model,tools}/**'], [konva, react]),
-  restrict(['server/**/*.ts'], [express, drizzle], [
-    'server/app.ts', 'server/http/**', 'server/**/*.routes.ts', 'server/database/**', 'server/**/*.queries.ts',
-  ]),
+  restrict(
+    ['server/**/*.ts'],
+    [express, drizzle],
+    [
+      'server/app.ts',
+      'server/http/**',
+      'server/**/*.routes.ts',
+      'server/database/**',
+      'server/**/*.queries.ts',
+    ],
+  ),
   restrict(['server/{http/**,**/*.routes.ts,app.ts}'], [drizzle], ['server/http/**/*.queries.ts']),
   restrict(['server/{database/**,**/*.queries.ts}'], [express]),
   { files: ['src/**/*.{ts,tsx}'], ...reactHooks.configs.flat['recommended-latest'] },

@@ -5,6 +5,7 @@ import { type Money, moneyFromMain, moneyToMain } from '../units/money'
 
 /** Longest length anything may state: 1 km. A larger figure is a slip of the finger. */
 const LONGEST = nanometres(1e12)
+const LONGEST_BACKWARD = nanometres(-1e12)
 
 /**
  * How lengths, forces and money are written. One schema is built over this, once for the program's own
@@ -29,7 +30,7 @@ const branded = <Quantity extends number>(schema: z.ZodType<number, number>) =>
 
 /** The program's own units: whole nanometres, newtons, minor units of money. */
 export const storedQuantities: Quantities = {
-  length: branded<Length>(z.int().min(-LONGEST).max(LONGEST)),
+  length: branded<Length>(z.int().min(LONGEST_BACKWARD).max(LONGEST)),
   size: branded<Length>(z.int().min(0).max(LONGEST)),
   positive: branded<Length>(z.int().min(1).max(LONGEST)),
   force: branded<Force>(z.number().positive().max(1e12)),
