@@ -1,3 +1,4 @@
+import { existsSync, readdirSync } from 'node:fs'
 import js from '@eslint/js'
 import { createTypeScriptImportResolver } from 'eslint-import-resolver-typescript'
 import { importX } from 'eslint-plugin-import-x'
@@ -60,6 +61,25 @@ const zone = (target: string, from: string[], message: string) => ({
   from: from.map((name) => `${here}${name}`),
   message,
 })
+const foldersIn = (name: string): string[] =>
+  existsSync(`${here}${name}`)
+    ? readdirSync(`${here}${name}`, { withFileTypes: true }).flatMap((entry) =>
+        entry.isDirectory() ? [entry.name] : [],
+      )
+    : []
+/** On the client a feature never imports another: the route joins them. */
+const clientFeatures = foldersIn('src/features').map((name) => ({
+  target: `${here}src/features/${name}`,
+  from: `${here}src/features`,
+  except: [`./${name}`],
+  message: 'A feature never imports another: join them in src/app/routes.',
+}))
+/** On the server a feature reaches another through its service. */
+const serverFeatures = foldersIn('server/features').map((name) => ({
+  target: `${here}server/features/${name}/**`,
+  from: `${here}server/features/!(${name})/*.{queries,routes}.ts`,
+  message: 'Reach another feature through its service.',
+}))
 const later = ['shared/survey', 'shared/calculation', 'shared/cut-list']
 
 export default tseslint.config(
@@ -87,6 +107,8 @@ export default tseslint.config(
         'error',
         {
           zones: [
+            ...clientFeatures,
+            ...serverFeatures,
             zone('shared', ['server', 'src', 'tests', 'e2e', 'scripts'], 'shared imports only itself.'),
             zone('server', ['src', 'tests', 'e2e', 'scripts'], 'server imports shared, never src.'),
             zone('src', ['server', 'tests', 'e2e', 'scripts'], 'src imports shared, never server.'),
