@@ -9,6 +9,7 @@ import { tapeLimit } from './tape-limit'
 /** The overall reading of a run at a cable's height; nm, unrounded. */
 export interface OverallPath {
   kind: 'overall'
+  readings: GapReadings
   value: number
   count: number
   readingLimit: number
@@ -61,6 +62,7 @@ export function overallPath(
   if (!read) return undefined
   const term: OverallPath = {
     kind: 'overall',
+    readings: overall,
     value: read.value,
     count: read.count,
     readingLimit: rules.readingLimit / Math.sqrt(read.count),
