@@ -71,12 +71,23 @@ export function cutLength(problem: CutProblem, { reserve, cutStep, trim }: CutRu
   const stretch = stretchAtTension(path, strain)
   const limit = takeUp * (1 - reserve)
   const longest = Math.max(0, Math.min(maxRun, (limit - us) / strain))
-  const common = { base, stretch, limit, longest }
-  if (exceeds(path, longest)) return { mode: 'none', ...common }
+  if (exceeds(path, longest)) return { mode: 'none', base, stretch, limit, longest }
   const cut = roundUpToStep(base + u, cutStep) as Length
-  if (fitsTakeUp(cut, { base, u, stretch, limit })) return shopCut(cut, { ...common, u })
+  if (fitsTakeUp(cut, { base, u, stretch, limit })) return shopCut(cut, { base, stretch, limit, longest, u })
   const long = roundUpToStep(base + u + trim, cutStep) as Length
-  return { mode: 'site', ...common, cut: long, finish: base, u: us, planned: stretch, worst: us + stretch }
+  const worst = us + stretch
+  return {
+    mode: 'site',
+    base,
+    stretch,
+    limit,
+    longest,
+    cut: long,
+    finish: base,
+    u: us,
+    planned: stretch,
+    worst,
+  }
 }
 
 /** Whether a cut can be crimped at both ends in the shop: slack + U + stretch ≤ limit. */
@@ -88,9 +99,9 @@ export const fitsTakeUp = (
 /** The figures of a shop cable cut to a given length. */
 export function shopCut(
   cut: Length,
-  given: Omit<ShopCut, 'mode' | 'cut' | 'slack' | 'planned' | 'worst'>,
+  { base, stretch, limit, longest, u }: Pick<ShopCut, 'base' | 'stretch' | 'limit' | 'longest' | 'u'>,
 ): ShopCut {
-  const slack = cut - given.base
-  const planned = slack + given.stretch
-  return { ...given, mode: 'shop', cut, slack, planned, worst: planned + given.u }
+  const slack = cut - base
+  const planned = slack + stretch
+  return { mode: 'shop', base, stretch, limit, longest, cut, slack, u, planned, worst: planned + u }
 }

@@ -106,10 +106,12 @@ function cutProblem(
   }
 }
 
+/** Gives each cable the length it is to be cut at: its own, or the run's one length. */
 function group(cables: CableFigures[], { rules }: SurveyIndex): CableFigures[] {
   const own = cables.flatMap((cable) => (cable.own ? [cable.own] : []))
   const cuts = rules.grouping === 'run' && own.length === cables.length ? groupCuts(own) : undefined
-  return cables.map((cable, i) => ({ ...cable, cut: cuts?.[i] ?? cable.own }))
+  for (const [i, cable] of cables.entries()) cable.cut = cuts?.[i] ?? cable.own
+  return cables
 }
 
 /** How much a run's pitch changes at each post passed, in degrees; only where both angles are known. */
