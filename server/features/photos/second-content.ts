@@ -31,9 +31,9 @@ const isFiller = (rest: Buffer): boolean => rest.every((byte) => byte === 0x00 |
 
 function isPhoneTrailer(rest: Buffer): boolean {
   const start = rest.findIndex((byte) => byte !== 0)
-  const trailer = rest.subarray(start)
-  const further = trailer[0] === 0xff && trailer[1] === 0xd8
-  const film = trailer.subarray(4, 8).toString('latin1') === 'ftyp'
-  const index = trailer.subarray(-4).toString('latin1') === 'SEFT'
-  return further || film || index
+  const furtherPicture = rest[start] === 0xff && rest[start + 1] === 0xd8
+  // A film begins with a box: its length, whose first bytes are zero, then its kind (ISO/IEC 14496-12).
+  const film = rest.subarray(start, start + 8).includes('ftyp', 0, 'latin1')
+  const makersIndex = rest.subarray(-4).toString('latin1') === 'SEFT'
+  return furtherPicture || film || makersIndex
 }
