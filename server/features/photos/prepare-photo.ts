@@ -1,7 +1,7 @@
 import sharp, { type Metadata, type Sharp } from 'sharp'
 import { inspectPhoto, type UploadedFile } from './inspect-photo'
 import { type PhotoDetails, readPhotoDetails } from './photo-details'
-import type { PhotoRefusal} from './refusals';
+import type { PhotoRefusal } from './refusals'
 import { refusal } from './refusals'
 
 export const MAX_BYTES = 25 * 1024 * 1024
