@@ -1,0 +1,63 @@
+import { createApp } from './app'
+import { ConfigError, readConfig, type Config } from './config'
+import { openDatabase } from './database/client'
+import { explainDatabaseFailure } from './database/explain-failure'
+import { migrateDatabase } from './database/migrate'
+import { explainListenFailure, listen } from './listen'
+
+const say = (text: string): boolean => process.stdout.write(`${text}\n`)
+
+/** The server from first to last: database to its present shape, demo the first time, listen, close when told. */
+async function run(config: Config): Promise<void> {
+  await migrateDatabase({ url: config.databaseUrl, folder: config.migrationsFolder })
+  const open = openDatabase({ url: config.databaseUrl })
+  try {
+    const app = createApp({ config, open })
+    const listening = await listen(app, config)
+    try {
+      say(`Tautbook is ready at ${config.publicUrl ?? listening.address}`)
+      await untilTold()
+    } finally {
+      await listening.close()
+    }
+  } finally {
+    await open.close()
+  }
+}
+
+/** Resolves at the first SIGINT or SIGTERM, or when the program that started this one is gone. */
+function untilTold(): Promise<void> {
+  return new Promise((resolve) => {
+    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, () => resolve())
+    if (process.connected) process.on('disconnect', () => resolve())
+  })
+}
+
+/** Failures that somebody can mend get a sentence; anything else is a fault of ours and keeps its stack. */
+function explain(error: unknown, config: Config): string {
+  return (
+    explainDatabaseFailure(error, config.databaseUrl) ??
+    explainListenFailure(error, config) ??
+    (error instanceof Error ? (error.stack ?? error.message) : String(error))
+  )
+}
+
+async function main(): Promise<number> {
+  let config: Config
+  try {
+    config = readConfig(process.env)
+  } catch (error) {
+    if (!(error instanceof ConfigError)) throw error
+    for (const fault of error.faults) process.stderr.write(`${fault}\n`)
+    return 1
+  }
+  try {
+    await run(config)
+    return 0
+  } catch (error) {
+    process.stderr.write(`${explain(error, config)}\n`)
+    return 1
+  }
+}
+
+process.exit(await main())
