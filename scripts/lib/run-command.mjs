@@ -1,0 +1,62 @@
+import { spawn } from 'node:child_process'
+import { Stopped } from './trouble.mjs'
+
+const running = new Set()
+const wishes = new Set()
+let told = false
+
+/** From now on Ctrl-C and its like end the programs we started and run what was left with `onStop`, then nothing else. */
+export function watchSignals() {
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
+    process.on(signal, () => {
+      told = true
+      for (const child of running) child.kill('SIGTERM')
+      for (const wish of wishes) wish()
+    })
+  }
+}
+
+/** Calls back when somebody wants to stop; returns how to take that back. */
+export function onStop(wish) {
+  wishes.add(wish)
+  if (told) wish()
+  return () => wishes.delete(wish)
+}
+
+/** @throws Stopped once somebody wants to stop, so that no further step begins. */
+export function goOn() {
+  if (told) throw new Stopped()
+}
+
+/**
+ * Runs a program to its end and keeps what it says; `status` is null when it could not be started or was killed.
+ * With `show` its words also go to standard error as they come.
+ */
+export function run(program, args, { show = false, ...options } = {}) {
+  return new Promise((resolve) => {
+    const child = spawn(program, args, { stdio: ['ignore', 'pipe', 'pipe'], ...options })
+    let output = ''
+    const hear = (chunk) => {
+      output += chunk
+      if (show) process.stderr.write(chunk)
+    }
+    running.add(child)
+    child.stdout.on('data', hear)
+    child.stderr.on('data', hear)
+    // A server left behind by the program may hold its output open for ever, so its exit is what counts.
+    child.on('exit', (status) => {
+      running.delete(child)
+      setImmediate(() => {
+        child.stdout.destroy()
+        child.stderr.destroy()
+        resolve({ status, output })
+      })
+    })
+    child.on('error', (error) => {
+      running.delete(child)
+      resolve({ status: null, output: `${output}${error.message}\n` })
+    })
+  })
+}
+
+export const pause = (ms) => new Promise((resolve) => setTimeout(resolve, ms))
