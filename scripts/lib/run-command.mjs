@@ -5,15 +5,21 @@ const running = new Set()
 const wishes = new Set()
 let told = false
 
+function stopAll() {
+  told = true
+  for (const child of running) child.kill('SIGTERM')
+  for (const wish of wishes) wish()
+}
+
 /** From now on Ctrl-C and its like end the programs we started and run what was left with `onStop`, then nothing else. */
 export function watchSignals() {
-  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
-    process.on(signal, () => {
-      told = true
-      for (const child of running) child.kill('SIGTERM')
-      for (const wish of wishes) wish()
-    })
-  }
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, stopAll)
+  // When npm itself is killed nobody is told: this process merely gets another parent.
+  const parent = process.ppid
+  if (!process.env.npm_lifecycle_event) return
+  setInterval(() => {
+    if (process.ppid !== parent && !told) stopAll()
+  }, 500).unref()
 }
 
 /** Calls back when somebody wants to stop; returns how to take that back. */
