@@ -14,6 +14,7 @@ export default defineConfig({
           name: 'unit',
           include: ['tests/{shared,src,scripts}/**/*.test.{ts,tsx}'],
           environment: 'node',
+          setupFiles: ['tests/setup/strict.ts'],
         },
       },
       {
