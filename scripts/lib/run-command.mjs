@@ -14,9 +14,12 @@ function stopAll() {
 /** From now on Ctrl-C and its like end the programs we started and run what was left with `onStop`, then nothing else. */
 export function watchSignals() {
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, stopAll)
-  // When npm itself is killed nobody is told: this process merely gets another parent.
+  if (process.env.npm_lifecycle_event) stopWithParent()
+}
+
+/** When the program that started this one is killed nobody is told: this process merely gets another parent. */
+export function stopWithParent() {
   const parent = process.ppid
-  if (!process.env.npm_lifecycle_event) return
   setInterval(() => {
     if (process.ppid !== parent && !told) stopAll()
   }, 500).unref()
