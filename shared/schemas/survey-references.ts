@@ -1,5 +1,3 @@
-import type { z } from 'zod'
-
 interface Names {
   posts: { id: string }[]
   bays: { id: string; from: string; to: string; readings: { id: string }[] }[]
@@ -10,11 +8,11 @@ interface Names {
 }
 
 type Path = (string | number)[]
-type Report = (path: Path, value: unknown, message: string) => void
+/** Takes a fault: where, what was found there, what was expected. */
+export type Report = (path: Path, value: unknown, message: string) => void
 
 /** Checks that ids are unique, that every name leads somewhere and that a run's bays follow one another. */
-export function checkSurveyReferences(survey: Names, context: z.RefinementCtx): void {
-  const report: Report = (path, input, message) => context.addIssue({ code: 'custom', path, input, message })
+export function checkSurveyReferences(survey: Names, report: Report): void {
   for (const list of ['posts', 'bays', 'runs', 'diagonals', 'photos'] as const)
     checkUnique(survey[list], [list], report)
   const posts = new Set(survey.posts.map((post) => post.id))

@@ -11,9 +11,9 @@ import { checkSurveyReferences } from './survey-references'
 /** The version of the survey's own format; older ones are brought up by `survey/survey-versions.ts`. */
 export const SURVEY_VERSION = 1
 
-const makeDiagonalSchema = (q: Quantities) =>
+export const makeDiagonalSchema = (q: Quantities) =>
   z.strictObject({ id: idSchema, from: idSchema, to: idSchema, value: q.positive })
-const cornerSchema = z.strictObject({ post: idSchema, angle: z.number().gt(0).max(180) })
+export const cornerSchema = z.strictObject({ post: idSchema, angle: z.number().gt(0).max(180) })
 
 /** A diagonal, post centre to post centre. */
 export type Diagonal = z.infer<ReturnType<typeof makeDiagonalSchema>>
@@ -36,7 +36,11 @@ export const makeSurveySchema = (q: Quantities) =>
       corners: z.array(cornerSchema).max(200).default([]),
       photos: z.array(makePhotoSchema(q)).max(100).default([]),
     })
-    .superRefine(checkSurveyReferences)
+    .superRefine((survey, context) =>
+      checkSurveyReferences(survey, (path, input, message) =>
+        context.addIssue({ code: 'custom', path, input, message }),
+      ),
+    )
 
 /** A survey as the program keeps it: whole nanometres and newtons; `units` says how it is shown and exported. */
 export const surveySchema = makeSurveySchema(storedQuantities)
