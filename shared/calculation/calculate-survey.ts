@@ -1,3 +1,4 @@
+import type { Finding } from '../schemas/finding'
 import { calculateRun } from './calculate-run'
 import { bayFindings } from './findings/reading-findings'
 import { toFinding } from './findings/notice'
@@ -23,6 +24,12 @@ export function calculateSurvey(input: CalculationInput): SurveyResult {
   return {
     runs: calculated.map(({ result }) => result),
     cables: calculated.flatMap(({ result }) => result.cables),
-    findings: [...ofBays, ...calculated.flatMap(({ findings }) => findings)],
+    findings: once([...ofBays, ...calculated.flatMap(({ findings }) => findings)]),
   }
+}
+
+/** What two runs say alike of a post they share is said once. */
+function once(findings: Finding[]): Finding[] {
+  const said = new Set<string>()
+  return findings.filter(({ text }) => !said.has(text) && said.add(text))
 }

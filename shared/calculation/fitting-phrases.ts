@@ -18,7 +18,9 @@ export function passedOverPhrase(reason: PassedOver): Phrase {
         { angle: reason.angle },
       ]
     case 'core-not-listed':
-      return [`no least grip is given for a core of ${reason.core}`]
+      return reason.core === 'veneered'
+        ? ['the core under the veneer is not known']
+        : [`no least grip is given for a core of ${reason.core}`]
     case 'grip':
       return [
         'grips ',

@@ -71,26 +71,24 @@ function endNotices(end: RunEnd, { course }: RunFigures): Notice[] {
   const notices: Notice[] = []
   if (post.material === 'veneered' && post.cover === undefined) {
     const phrase = [`Post ${post.id} is veneered, but its cover was not measured; none is reckoned with.`]
-    notices.push({ level: 'check', code: 'missing-cover', where, phrase })
+    notices.push({ level: 'check', code: 'missing-cover', where: { post: post.id }, phrase })
   }
   if (end.choice && !end.choice.chosen && !needsSize(end)) notices.push(noFitting(end, course.run.id))
   return notices
 }
 
+/** A catalogue may be long; the working lists every fitting. */
+const MOST_REASONS = 4
+
 function noFitting({ post: { post }, choice }: RunEnd, run: string): Notice {
   const reasons = (choice?.passedOver ?? []).filter(({ reason }) => reason.because !== 'material')
-  const listed = reasons.flatMap(({ fitting, reason }): Phrase => [
-    ` ${fitting.name}: `,
-    ...passedOverPhrase(reason),
-    '.',
-  ])
-  const none = `No fitting of the hardware is made for ${post.material} posts.`
-  return {
-    level: 'stop',
-    code: 'no-fitting',
-    where: { run, post: post.id },
-    phrase: [`Run ${run}: no fitting suits post ${post.id}.`, ...(listed.length > 0 ? listed : [` ${none}`])],
-  }
+  const listed = reasons
+    .slice(0, MOST_REASONS)
+    .flatMap(({ fitting, reason }): Phrase => [` ${fitting.name}: `, ...passedOverPhrase(reason), '.'])
+  if (reasons.length > MOST_REASONS) listed.push(` So too ${reasons.length - MOST_REASONS} more.`)
+  if (reasons.length === 0) listed.push(` No fitting of the hardware is made for ${post.material} posts.`)
+  const phrase = [`Run ${run}: no fitting suits post ${post.id}.`, ...listed]
+  return { level: 'stop', code: 'no-fitting', where: { run, post: post.id }, phrase }
 }
 
 function impossibleNotices({ course: { run }, cables }: RunFigures): Notice[] {

@@ -113,7 +113,7 @@ describe('a stair taped along the slope', () => {
 })
 
 describe('a post passed on a slope', () => {
-  const three = (first: object, second: object): Given => ({
+  const three = (first: Record<string, unknown>, second: Record<string, unknown>): Given => ({
     posts: [post('P1'), post('P2'), post('P3')],
     bays: [bay('B1', ['P1', 'P2'], [50], first), bay('B2', ['P2', 'P3'], [50], second)],
   })

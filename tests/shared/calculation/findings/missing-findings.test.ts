@@ -75,6 +75,29 @@ describe('a missing fitting', () => {
     )
   })
 
+  it('is told for four fittings, the rest being counted', () => {
+    const fittings = [1, 2, 3, 4, 5, 6].map((n) => ({
+      ...exampleFitting,
+      id: `F${n}`,
+      name: `Sleeve ${n}`,
+      body: 4,
+    }))
+    const [finding] = calculate(oneBay({ posts: [post('P1'), post('P2', { along: 5 })], fittings })).findings
+    expect(finding?.where).toEqual({ run: 'R1', post: 'P1' })
+    expect(finding?.text).toContain(
+      'Sleeve 4: its body of 4 in is longer than the 3 in the post allows. So too 2 more.',
+    )
+    expect(finding?.text).not.toContain('Sleeve 5')
+  })
+
+  it('is put down to a core that nobody noted', () => {
+    const fittings = [{ ...exampleFitting, materials: ['softwood', 'veneered'] }]
+    const posts = [post('P1'), post('P2', { material: 'veneered', cover: 0 })]
+    expect(calculate(oneBay({ posts, fittings })).findings[0]?.text).toContain(
+      'the core under the veneer is not known',
+    )
+  })
+
   it('is put down to the material where that is not known', () => {
     const given = oneBay({ posts: [post('P1'), { id: 'P2', along: 3.5, across: 3.5 }] })
     expect(outcome(given)).toEqual({
@@ -92,9 +115,7 @@ describe('a veneered post without a cover', () => {
     })
     const { cables, findings } = calculate(given)
     expect(cables[0]?.mode).toBe('shop')
-    expect(findings).toMatchObject([
-      { level: 'check', code: 'missing-cover', where: { run: 'R1', post: 'P2' } },
-    ])
+    expect(findings).toMatchObject([{ level: 'check', code: 'missing-cover', where: { post: 'P2' } }])
   })
 })
 

@@ -6,7 +6,11 @@ const stair = { kind: 'stair', rise: 30, going: 40 }
 const anyAngle = [{ ...exampleFitting, maxAngle: 90 }]
 
 describe('a change of pitch', () => {
-  const bent = (first: object, second: object, more: Partial<Given> = {}) => ({
+  const bent = (
+    first: Record<string, unknown>,
+    second: Record<string, unknown>,
+    more: Partial<Given> = {},
+  ) => ({
     posts: [post('P1'), post('P2'), post('P3')],
     bays: [bay('B1', ['P1', 'P2'], [40], first), bay('B2', ['P2', 'P3'], [40], second)],
     fittings: anyAngle,
