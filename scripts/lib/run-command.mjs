@@ -52,15 +52,15 @@ export function run(program, args, { show = false, ...options } = {}) {
     running.add(child)
     child.stdout.on('data', hear)
     child.stderr.on('data', hear)
-    // A server left behind by the program may hold its output open for ever, so its exit is what counts.
-    child.on('exit', (status) => {
+    const end = (status) => {
       running.delete(child)
-      setImmediate(() => {
-        child.stdout.destroy()
-        child.stderr.destroy()
-        resolve({ status, output })
-      })
-    })
+      child.stdout.destroy()
+      child.stderr.destroy()
+      resolve({ status, output })
+    }
+    child.on('close', end)
+    // A server left behind by the program may hold its output open for ever.
+    child.on('exit', (status) => setTimeout(end, 500, status))
     child.on('error', (error) => {
       running.delete(child)
       resolve({ status: null, output: `${output}${error.message}\n` })

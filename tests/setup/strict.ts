@@ -31,7 +31,7 @@ Socket.prototype.connect = function guarded(this: Socket, ...args: unknown[]): S
   // Destroyed, so that the caller sees a failed connection as it would for a host that is not there.
   process.nextTick(() => this.destroy(new Error(`Tests may not reach for the network: ${host}`)))
   return this
-} as typeof Socket.prototype.connect
+}
 
 const original = console.error
 console.error = (...words: unknown[]) => {
