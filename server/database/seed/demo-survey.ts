@@ -84,7 +84,7 @@ function minutesAfter(written: string, minutes: number): string {
   return new Date(Date.parse(`${day.replaceAll(':', '-')}T${time}Z`) + minutes * 60_000).toISOString()
 }
 
-/** Corners are square where runs meet at one; diagonals are read arris to arris and written centre to centre. */
+/** A corner is read to half a degree; diagonals are read arris to arris and written centre to centre. */
 function cornerOperations({ corners, diagonals, taped }: DemoTruth): SimpleOperation[] {
   const between = diagonals.flatMap(({ from, to, length, centreToCentre }): SimpleOperation[] => {
     const read = taped.diagonals.find((diagonal) => diagonal.from === from && diagonal.to === to)
@@ -95,7 +95,7 @@ function cornerOperations({ corners, diagonals, taped }: DemoTruth): SimpleOpera
   return [
     ...corners.map(({ post, angleDeg }) => ({
       type: 'corner.set' as const,
-      corner: { post, angle: Math.round(angleDeg) },
+      corner: { post, angle: Math.round(angleDeg * 2) / 2 },
     })),
     ...between,
   ]
