@@ -5,7 +5,8 @@ const running = new Set()
 const wishes = new Set()
 let told = false
 
-function stopAll() {
+/** Ends everything, as if somebody had pressed Ctrl-C. */
+export function stopAll() {
   told = true
   for (const child of running) child.kill('SIGTERM')
   for (const wish of wishes) wish()
