@@ -11,6 +11,7 @@ import {
   uuid,
 } from 'drizzle-orm/pg-core'
 import { jobs } from './jobs'
+import { people } from './people'
 
 /** A survey as one document, and what lists show of it without opening the document. */
 export const surveys = pgTable(
@@ -64,5 +65,6 @@ export const surveyChanges = pgTable(
       columns: [table.companyId, table.surveyId],
       foreignColumns: [surveys.companyId, surveys.id],
     }),
+    foreignKey({ columns: [table.companyId, table.personId], foreignColumns: [people.companyId, people.id] }),
   ],
 )

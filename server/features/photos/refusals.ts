@@ -1,3 +1,5 @@
+import { AppError } from '../../errors'
+
 export type PhotoRefusalCode =
   | 'photo-empty'
   | 'photo-heic'
@@ -8,13 +10,11 @@ export type PhotoRefusalCode =
   | 'photo-too-many-pixels'
   | 'photo-two-kinds'
 
-/** Why a file is not taken as a photo: a code for programs and a sentence for people. */
-export class PhotoRefusal extends Error {
-  constructor(
-    readonly code: PhotoRefusalCode,
-    sentence: string,
-  ) {
-    super(sentence)
+/** Why a file is not taken as a photo: 415 where the kind of file is the matter, 422 where this one is. */
+export class PhotoRefusal extends AppError {
+  constructor(code: PhotoRefusalCode, sentence: string) {
+    const kind = code === 'photo-heic' || code === 'photo-kind' || code === 'photo-mislabelled'
+    super(kind ? 415 : 422, code, sentence)
     this.name = 'PhotoRefusal'
   }
 }

@@ -1,0 +1,74 @@
+import type { z } from 'zod'
+import type { OperationRefused } from '@shared/survey/operation-refused'
+import { AppError, notFound } from '../../errors'
+
+export const noSuchSurvey = () => notFound('survey')
+export const noSuchJob = () => notFound('job')
+
+/** The revision stands in the sentence for people and in a field for programs. */
+export const surveyMoved = (revision: number) =>
+  new AppError(
+    409,
+    'survey-moved',
+    `The survey has been changed elsewhere and is now at revision ${revision}. Load it again and repeat the change.`,
+    { fields: [{ path: 'revision', message: String(revision) }] },
+  )
+
+export const operationRefused = (refused: OperationRefused, changeId: string) =>
+  new AppError(422, `operation-${refused.code}`, refused.message, {
+    fields: [{ path: `changes.${changeId}`, message: refused.message }],
+    cause: refused,
+  })
+
+/** The operations fit one by one, yet what they leave is no survey. */
+export const surveyInvalid = (error: z.ZodError) => {
+  const fields = error.issues.map(({ path, message }) => ({ path: path.join('.'), message }))
+  const first = fields[0]
+  return new AppError(
+    422,
+    'survey-invalid',
+    `The survey would not hold together after this change: ${first?.path ?? 'survey'}: ${first?.message ?? 'not valid'}.`,
+    { fields },
+  )
+}
+
+export const cableNotInCatalogue = (runs: readonly { id: string; cable: string }[]) => {
+  const cables = [...new Set(runs.map(({ cable }) => cable))].join(', ')
+  const where = runs.map(({ id }) => id).join(', ')
+  return new AppError(
+    422,
+    'cable-not-in-catalogue',
+    `Run ${where} uses the cable ${cables}, which your hardware does not have. Add that cable under Hardware, or choose another for the run.`,
+    {
+      fields: runs.map(({ id, cable }) => ({
+        path: `survey.runs.${id}.cable`,
+        message: `found "${cable}", expected the id of a cable of your hardware`,
+      })),
+    },
+  )
+}
+
+/** Every fault of a survey file, one sentence each: path, value, what was expected. */
+export const surveyFileFaults = (faults: readonly string[]) =>
+  new AppError(
+    422,
+    'survey-file-invalid',
+    faults.length === 1
+      ? `The survey file has a fault and nothing was imported. ${faults[0]}`
+      : `The survey file has ${faults.length} faults and nothing was imported. Correct them and import it again.`,
+    {
+      fields: faults
+        .flatMap((fault) => fault.split('\n'))
+        .map((fault) => {
+          const end = fault.indexOf(': ')
+          return { path: fault.slice(0, Math.max(end, 0)), message: fault.slice(end < 0 ? 0 : end + 2) }
+        }),
+    },
+  )
+
+export const surveyFileTooLarge = () =>
+  new AppError(
+    413,
+    'survey-file-too-large',
+    'The survey file is larger than 2 MB. A survey file holds no pictures and stays far below that: check that it is the right file.',
+  )
