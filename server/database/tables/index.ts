@@ -1,1 +1,9 @@
-export {}
+export * from './companies'
+export * from './hardware'
+export * from './house-rules'
+export * from './invitations'
+export * from './jobs'
+export * from './people'
+export * from './photos'
+export * from './sessions'
+export * from './surveys'

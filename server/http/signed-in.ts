@@ -1,0 +1,33 @@
+import 'passport'
+import type { Role } from '@shared/schemas/role'
+import type { Company } from '@shared/schemas/company'
+
+/** The person a request comes from, read afresh from the database for every request. */
+export interface SignedIn {
+  id: string
+  companyId: string
+  name: string
+  email: string
+  roles: Role[]
+  lastSignIn: string | null
+  company: Company
+}
+
+declare global {
+  // eslint-disable-next-line @typescript-eslint/no-namespace -- passport names its user here
+  namespace Express {
+    // eslint-disable-next-line @typescript-eslint/no-empty-object-type
+    interface User extends SignedIn {}
+  }
+}
+
+declare module 'express-session' {
+  interface SessionData {
+    /** The token that requests which change something must carry. */
+    csrf: string
+    /** Set by the session store from its own query, never written. */
+    account?: SignedIn
+    /** When it ends, in milliseconds; set by the session store. */
+    expiresAt?: number
+  }
+}
