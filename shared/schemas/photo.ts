@@ -3,7 +3,7 @@ import type { PhotoPoint } from '../geometry/point'
 import { idSchema } from './id'
 import type { Quantities } from './quantities'
 
-const photoPointSchema: z.ZodType<PhotoPoint, [number, number]> = z.tuple([z.number(), z.number()])
+const photoPointSchema: z.ZodType<PhotoPoint, PhotoPoint> = z.tuple([z.number(), z.number()])
 
 export const postMarkSchema = z.strictObject({ base: photoPointSchema, top: photoPointSchema.optional() })
 /** Where a post shows on a photo: a stroke from its base to its top. */

@@ -65,10 +65,3 @@ export const surveyFileFaults = (faults: readonly string[]) =>
         }),
     },
   )
-
-export const surveyFileTooLarge = () =>
-  new AppError(
-    413,
-    'survey-file-too-large',
-    'The survey file is larger than 2 MB. A survey file holds no pictures and stays far below that: check that it is the right file.',
-  )
