@@ -1,5 +1,6 @@
 import { sql } from 'drizzle-orm'
 import {
+  type AnyPgColumn,
   date,
   foreignKey,
   index,
@@ -14,6 +15,9 @@ import {
 import { stages } from '@shared/schemas/job'
 import { companies } from './companies'
 import { people } from './people'
+
+/** A job without a date comes after all that have one; the index and the queries must say it alike. */
+export const dueOrNever = (due: AnyPgColumn) => sql`coalesce(${due}, 'infinity'::date)`
 
 export const jobs = pgTable(
   'jobs',
@@ -44,7 +48,7 @@ export const jobs = pgTable(
     foreignKey({ columns: [table.companyId, table.personId], foreignColumns: [people.companyId, people.id] }),
     // One index for each way of listing, in the order of the keyset.
     index('jobs_updated').on(table.companyId, table.updatedAt, table.id),
-    index('jobs_due').on(table.companyId, table.due, table.id),
+    index('jobs_due').on(table.companyId, dueOrNever(table.due), table.id),
     index('jobs_stage').on(table.companyId, table.stage, table.updatedAt, table.id),
     index('jobs_person').on(table.companyId, table.personId, table.updatedAt, table.id),
   ],
