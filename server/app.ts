@@ -1,22 +1,59 @@
 import path from 'node:path'
-import express, { type Express } from 'express'
-import type { Config } from './config'
-import type { OpenDatabase } from './database/client'
+import express, { type Express, Router } from 'express'
+import helmet from 'helmet'
+import { pinoHttp } from 'pino-http'
+import { protectFromForgery } from './http/csrf'
+import { errorHandler, nothingHere } from './http/error-handler'
+import { generalLimit } from './http/rate-limit'
+import { sessions } from './http/sessions'
+import type { Services } from './services'
+import { featureRoutes } from './features/routes'
 
-export interface Services {
-  config: Config
-  open: OpenDatabase
-}
-
-export function createApp({ config, open }: Services): Express {
+/** The whole server over its services: what every request passes, then the features, then the client's files. */
+export function createApp(services: Services): Express {
+  const { config, log } = services
   const app = express()
   app.disable('x-powered-by')
-  app.get('/api/health', (_request, response, next) => {
-    open.sql`select 1`.then(() => response.json({ status: 'ok', database: 'ok' }), next)
-  })
-  app.use(express.static(config.clientFolder))
-  app.get(/^\/(?!api\/)/, (_request, response) => {
+  app.set('trust proxy', config.trustProxy ? 1 : false)
+  app.use(pinoHttp({ logger: log, autoLogging: { ignore: (request) => request.url === '/api/health' } }))
+  app.use(helmet(securityHeaders(config.secureCookies)))
+
+  const api = Router()
+  api.use('/api', generalLimit(), express.json({ limit: '2mb' }), ...sessions(services), protectFromForgery)
+  featureRoutes(api, services)
+  api.use('/api', nothingHere)
+  app.use(api)
+
+  app.use(
+    '/assets',
+    express.static(path.join(config.clientFolder, 'assets'), {
+      immutable: true,
+      maxAge: '1y',
+      fallthrough: false,
+    }),
+  )
+  app.use(express.static(config.clientFolder, { index: false, maxAge: '1h' }))
+  app.get(/^\/(?!api(\/|$))/, (_request, response) => {
+    response.set('Cache-Control', 'no-cache')
     response.sendFile(path.join(config.clientFolder, 'index.html'))
   })
+  app.use(errorHandler(log))
   return app
 }
+
+/** Everything comes from our own address; pictures may also be ones the page has just taken. */
+const securityHeaders = (https: boolean) => ({
+  contentSecurityPolicy: {
+    directives: {
+      defaultSrc: ["'self'"],
+      imgSrc: ["'self'", 'blob:', 'data:'],
+      // Konva and Radix place things by style attributes.
+      styleSrc: ["'self'", "'unsafe-inline'"],
+      objectSrc: ["'none'"],
+      frameAncestors: ["'none'"],
+      upgradeInsecureRequests: https ? [] : null,
+    },
+  },
+  strictTransportSecurity: https,
+  referrerPolicy: { policy: 'same-origin' as const },
+})

@@ -53,6 +53,8 @@ export interface Config {
   photoFolder: string
   clientFolder: string
   migrationsFolder: string
+  /** Where the demo’s pictures lie. */
+  demoFolder: string
 }
 
 /** One sentence for each setting that cannot be used. */
@@ -83,6 +85,7 @@ export function readConfig(environment: NodeJS.ProcessEnv, root: string = proces
     photoFolder: path.resolve(root, data.TAUTBOOK_DATA, 'photos'),
     clientFolder: path.join(root, 'dist', 'client'),
     migrationsFolder: path.join(root, 'drizzle'),
+    demoFolder: path.join(root, 'demo'),
   }
 }
 

@@ -3,7 +3,9 @@ import { ConfigError, readConfig, type Config } from './config'
 import { openDatabase } from './database/client'
 import { explainDatabaseFailure } from './database/explain-failure'
 import { migrateDatabase } from './database/migrate'
+import { seedDemo } from './database/seed/seed-demo'
 import { explainListenFailure, listen } from './listen'
+import { makeServices } from './make-services'
 
 const say = (text: string): boolean => process.stdout.write(`${text}\n`)
 
@@ -12,7 +14,9 @@ async function run(config: Config): Promise<void> {
   await migrateDatabase({ url: config.databaseUrl, folder: config.migrationsFolder })
   const open = openDatabase({ url: config.databaseUrl })
   try {
-    const app = createApp({ config, open })
+    const services = makeServices(config, open)
+    if (config.demo) await seedDemo({ ...services, folder: config.demoFolder })
+    const app = createApp(services)
     const listening = await listen(app, config)
     try {
       say(`Tautbook is ready at ${config.publicUrl ?? listening.address}`)

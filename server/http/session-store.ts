@@ -1,10 +1,9 @@
 import { createHash } from 'node:crypto'
 import { type SessionData, Store } from 'express-session'
-import type { Role } from '@shared/schemas/role'
 import type { Database } from '../database/client'
-import type { companies, people } from '../database/tables/index'
 import { deleteSession, extendSession, selectSession, upsertSession } from './session-store.queries'
-import type { SignedIn } from './signed-in'
+import { toSignedIn } from './account'
+import './signed-in'
 
 export const SESSION_DAYS = 30
 const HOUR = 3_600_000
@@ -73,23 +72,3 @@ export class SessionStore extends Store {
     return new Date(this.clock().getTime() + lifetime(signedIn))
   }
 }
-
-/** The person of a request, from the rows that hold them. */
-export const toSignedIn = (
-  person: typeof people.$inferSelect,
-  company: typeof companies.$inferSelect,
-): SignedIn => ({
-  id: person.id,
-  companyId: person.companyId,
-  name: person.name,
-  email: person.email,
-  roles: person.roles as Role[],
-  lastSignIn: person.lastSignInAt?.toISOString() ?? null,
-  company: {
-    id: company.id,
-    name: company.name,
-    units: { length: company.lengthUnit, force: company.forceUnit },
-    fraction: company.fraction === 64 ? 64 : company.fraction === 32 ? 32 : 16,
-    keepPhotoPlace: company.keepPhotoPlace,
-  },
-})

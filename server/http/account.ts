@@ -1,0 +1,33 @@
+import type { Company } from '@shared/schemas/company'
+import type { Person } from '@shared/schemas/person'
+import type { Role } from '@shared/schemas/role'
+import type { companies, people } from '../database/tables/index'
+import type { SignedIn } from './signed-in'
+
+type PersonRow = typeof people.$inferSelect
+type CompanyRow = typeof companies.$inferSelect
+
+/** A company as everybody in it sees it. */
+export const presentCompany = (row: CompanyRow): Company => ({
+  id: row.id,
+  name: row.name,
+  units: { length: row.lengthUnit, force: row.forceUnit },
+  fraction: row.fraction === 64 ? 64 : row.fraction === 32 ? 32 : 16,
+  keepPhotoPlace: row.keepPhotoPlace,
+})
+
+/** A person as the people of the company see them. */
+export const presentPerson = (row: PersonRow): Person => ({
+  id: row.id,
+  name: row.name,
+  email: row.email,
+  roles: row.roles as Role[],
+  state: row.disabledAt ? 'disabled' : row.passwordHash === null ? 'invited' : 'active',
+  lastSignIn: row.lastSignInAt?.toISOString() ?? null,
+})
+
+/** The person of a request. */
+export function toSignedIn(person: PersonRow, company: CompanyRow): SignedIn {
+  const { state: _state, ...shown } = presentPerson(person)
+  return { ...shown, companyId: person.companyId, company: presentCompany(company) }
+}

@@ -1,0 +1,43 @@
+import type { Request, Response } from 'express'
+import type { Session } from '@shared/schemas/session'
+import type { Config } from '../config'
+import { csrfToken } from './csrf'
+import { hashSessionId } from './session-store'
+import { cookieName } from './sessions'
+import type { SignedIn } from './signed-in'
+
+export const sessionIdHash = (request: Request): string => hashSessionId(request.sessionID)
+
+/** What a client is told of its session. */
+export function presentSession(request: Request, person: SignedIn): Session {
+  const { id, name, email, roles, lastSignIn, company } = person
+  return {
+    person: { id, name, email, roles, state: 'active', lastSignIn },
+    company,
+    csrfToken: csrfToken(request),
+  }
+}
+
+/** Begins a new session, under a new id and with a new token, for a person who has just shown who they are. */
+export async function beginSession(request: Request, person: SignedIn): Promise<Session> {
+  // Passport gives the session a new id, so one planted before sign-in is worth nothing after it.
+  await new Promise<void>((resolve, reject) =>
+    request.logIn(person, (error: unknown) => (error ? reject(asError(error)) : resolve())),
+  )
+  return presentSession(request, person)
+}
+
+/** Ends the session on the server and in the browser. */
+export async function endSession(request: Request, response: Response, config: Config): Promise<void> {
+  await new Promise<void>((resolve, reject) =>
+    request.session.destroy((error: unknown) => (error ? reject(asError(error)) : resolve())),
+  )
+  response.clearCookie(cookieName(config), {
+    httpOnly: true,
+    sameSite: 'lax',
+    secure: config.secureCookies,
+    path: '/',
+  })
+}
+
+const asError = (error: unknown): Error => (error instanceof Error ? error : new Error(String(error)))

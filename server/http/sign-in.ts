@@ -1,0 +1,36 @@
+import type { Request, Response } from 'express'
+import passport from 'passport'
+import { Strategy } from 'passport-local'
+import { AppError } from '../errors'
+import type { SignedIn } from './signed-in'
+
+const wrong = () =>
+  new AppError(401, 'wrong-sign-in', 'E-mail address or password is not right. Check both and try again.')
+
+/** Signs in by e-mail address and password. @throws AppError 401 `wrong-sign-in`, the same whichever was wrong. */
+export function signInWithPassword(
+  { request, response }: { request: Request; response: Response },
+  check: (email: string, password: string) => Promise<SignedIn | undefined>,
+): Promise<SignedIn> {
+  const strategy = new Strategy(
+    { usernameField: 'email', passwordField: 'password' },
+    (email, password, done) => {
+      check(email, password).then((person) => done(null, person ?? false), done)
+    },
+  )
+  const local = new passport.Passport()
+  local.use(strategy)
+  return new Promise((resolve, reject) => {
+    const answer = (error: unknown, person?: SignedIn | false) => {
+      if (error) reject(error instanceof Error ? error : new Error(String(error)))
+      else if (person) resolve(person)
+      else reject(wrong())
+    }
+    const authenticate = local.authenticate('local', { session: false }, answer) as (
+      request: Request,
+      response: Response,
+      next: (error?: unknown) => void,
+    ) => void
+    authenticate(request, response, answer)
+  })
+}
