@@ -2,7 +2,11 @@ import type { Stage } from '@shared/schemas/job'
 import type { Role } from '@shared/permissions/roles'
 
 /** The demo company and everybody in it are invented. */
-export const demoCompany = { name: 'Quillmere Rail & Deck', fraction: 16 as const }
+export const demoCompany = {
+  name: 'Quillmere Rail & Deck',
+  units: { length: 'in', force: 'lbf' },
+  fraction: 16,
+} as const
 
 export interface DemoPerson {
   name: string
