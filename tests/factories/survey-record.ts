@@ -1,5 +1,5 @@
 import type { Survey } from '@shared/schemas/survey'
-import { surveySchema } from '@shared/schemas/survey'
+import { newSurvey } from '@shared/survey/new-survey'
 import type { Database } from '../../server/database/client'
 import { surveys } from '../../server/database/tables/surveys'
 import { digest } from '../../server/features/surveys/survey-document'
@@ -7,13 +7,7 @@ import { createJob } from './job'
 
 export type SurveyRow = typeof surveys.$inferSelect
 
-export const emptySurvey = (): Survey =>
-  surveySchema.parse({
-    format: 'tautbook.survey',
-    version: 1,
-    units: { length: 'in', force: 'lbf' },
-    title: 'Back deck',
-  })
+export const emptySurvey = (): Survey => newSurvey('Back deck', { length: 'in', force: 'lbf' })
 
 interface Given {
   companyId?: string

@@ -20,9 +20,9 @@ export interface SeedDeps {
   folder: string
 }
 
-/** The visit to the ridge deck ended at the fifth bay, before one post’s material was noted. */
+/** The visit to the ridge deck ended at the fifth bay, before the last post’s material was noted. */
 const unfinished: Partial<Record<DemoPicture, DemoVisit['stoppedAt']>> = {
-  'ridge-deck': { bay: 5, post: 'P4' },
+  'ridge-deck': { bay: 5, post: 'E2' },
 }
 
 const DEMO_CABLE = 'c532'

@@ -1,5 +1,6 @@
 import { readSurveyFile, type SurveyFile, SurveyFileError } from '@shared/schemas/survey-file'
-import { cableNotInCatalogue, surveyFileFaults } from './surveys.errors'
+import { SurveyTooNew, upgradeSurvey } from '@shared/survey/survey-versions'
+import { cableNotInCatalogue, surveyFileFaults, surveyTooNew } from './surveys.errors'
 
 /**
  * Reads a parsed survey file for a company, without writing anything. @throws an error that lists every fault by path,
@@ -14,9 +15,13 @@ export function readImport(input: unknown, companyCables: ReadonlySet<string>): 
 
 function readFile(input: unknown): SurveyFile {
   try {
-    return readSurveyFile(input)
+    return readSurveyFile(hasSurvey(input) ? { ...input, survey: upgradeSurvey(input.survey) } : input)
   } catch (error) {
     if (error instanceof SurveyFileError) throw surveyFileFaults(error.faults)
+    if (error instanceof SurveyTooNew) throw surveyTooNew(error)
     throw error
   }
 }
+
+const hasSurvey = (input: unknown): input is { survey: unknown } =>
+  typeof input === 'object' && input !== null && !Array.isArray(input) && 'survey' in input

@@ -1,15 +1,10 @@
-import type { Units } from '@shared/schemas/quantities'
-import { SURVEY_VERSION, type Survey, surveySchema } from '@shared/schemas/survey'
+import { type Survey, surveySchema } from '@shared/schemas/survey'
 import { findGaps } from '@shared/survey/find-gaps'
 import { upgradeSurvey } from '@shared/survey/survey-versions'
 import type { SurveyDigest } from './surveys.queries'
 
 /** A stored document as the program knows surveys today; older ones are brought up. */
 export const readDocument = (document: unknown): Survey => surveySchema.parse(upgradeSurvey(document))
-
-/** A survey with nothing measured yet. */
-export const emptySurvey = (title: string, units: Units): Survey =>
-  surveySchema.parse({ format: 'tautbook.survey', version: SURVEY_VERSION, units, title })
 
 /** The document with what lists show of it. */
 export const digest = (survey: Survey): SurveyDigest => ({

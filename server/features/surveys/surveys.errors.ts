@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import type { OperationRefused } from '@shared/survey/operation-refused'
+import type { SurveyTooNew } from '@shared/survey/survey-versions'
 import { AppError, notFound } from '../../errors'
 
 export const noSuchSurvey = () => notFound('survey')
@@ -64,4 +65,12 @@ export const surveyFileFaults = (faults: readonly string[]) =>
           return { path: fault.slice(0, Math.max(end, 0)), message: fault.slice(end < 0 ? 0 : end + 2) }
         }),
     },
+  )
+
+export const surveyTooNew = (error: SurveyTooNew) =>
+  new AppError(
+    422,
+    'survey-too-new',
+    `The survey file was written by a newer program (format ${error.version}). Ask whoever sent it for an older format, or update this server.`,
+    { cause: error },
   )

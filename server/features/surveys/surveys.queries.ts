@@ -1,7 +1,6 @@
 import { and, asc, desc, eq, inArray, isNull, lt, sql } from 'drizzle-orm'
 import type { Database } from '../../database/client'
 import { jobs } from '../../database/tables/jobs'
-import { photos } from '../../database/tables/photos'
 import { surveyChanges, surveys } from '../../database/tables/surveys'
 
 export interface SurveyKey {
@@ -124,11 +123,11 @@ export const selectReadingOperations = (
       ),
     )
 
-/** The picture a list shows: the first one marked, else the first one stored. */
+/** The picture a list shows: the first one marked, else the first one stored. Named in full: columns inside are not. */
 const thumbnailPhotoId = sql<string | null>`(
-  select ${photos.id} from ${photos}
-  where ${photos.companyId} = ${surveys.companyId} and ${photos.surveyId} = ${surveys.id}
-  order by (${photos.surveyPhotoId} is not distinct from ${surveys.firstPhoto}) desc, ${photos.createdAt}
+  select p.id from photos p
+  where p.company_id = surveys.company_id and p.survey_id = surveys.id
+  order by (p.survey_photo_id is not distinct from surveys.first_photo) desc, p.created_at, p.survey_photo_id
   limit 1)`
 
 export const selectJobSurveys = (

@@ -1,10 +1,11 @@
 import type { SurveyHistoryEntry } from '@shared/endpoints/surveys'
 import type { Units } from '@shared/schemas/quantities'
 import type { SurveyRecord, SurveySummary } from '@shared/schemas/survey-record'
+import { newSurvey } from '@shared/survey/new-survey'
 import { surveyOperationSchema } from '@shared/survey/survey-operation'
 import type { Database } from '../../database/client'
 import { listPhotos } from '../photos/photo-records.service'
-import { digest, emptySurvey, readDocument } from './survey-document'
+import { digest, readDocument } from './survey-document'
 import { noSuchJob, noSuchSurvey } from './surveys.errors'
 import {
   insertSurvey,
@@ -22,7 +23,7 @@ export async function createSurvey(
   { companyId, jobId, title, units }: { companyId: string; jobId: string; title: string; units: Units },
 ): Promise<SurveyRecord> {
   if (!(await jobExists(database, { companyId, jobId }))) throw noSuchJob()
-  const survey = emptySurvey(title, units)
+  const survey = newSurvey(title, units)
   const surveyId = await insertSurvey(database, { companyId, jobId, ...digest(survey) })
   return readSurvey(database, { companyId, surveyId })
 }
