@@ -1,11 +1,14 @@
+import { folderPhotoStorage } from './adapters/photo-storage'
 import { createApp } from './app'
 import { ConfigError, readConfig, type Config } from './config'
-import { openDatabase } from './database/client'
+import { openDatabase, type OpenDatabase } from './database/client'
+import { demoSignInLines } from './database/demo-sign-ins'
 import { explainDatabaseFailure } from './database/explain-failure'
 import { migrateDatabase } from './database/migrate'
 import { seedDemo } from './database/seed/seed-demo'
 import { explainListenFailure, listen } from './listen'
-import { makeServices } from './make-services'
+import { createLog } from './log'
+import type { Services } from './services'
 
 const say = (text: string): boolean => process.stdout.write(`${text}\n`)
 
@@ -16,10 +19,9 @@ async function run(config: Config): Promise<void> {
   try {
     const services = makeServices(config, open)
     if (config.demo) await seedDemo({ ...services, folder: config.demoFolder })
-    const app = createApp(services)
-    const listening = await listen(app, config)
+    const listening = await listen(createApp(services), config)
     try {
-      say(`Tautbook is ready at ${config.publicUrl ?? listening.address}`)
+      greet(config.publicUrl ?? listening.address, config.demo ? await demoSignInLines(open) : [])
       await untilTold()
     } finally {
       await listening.close()
@@ -27,6 +29,20 @@ async function run(config: Config): Promise<void> {
   } finally {
     await open.close()
   }
+}
+
+const makeServices = (config: Config, open: OpenDatabase): Services => ({
+  config,
+  open,
+  database: open.database,
+  photoStorage: folderPhotoStorage(config.photoFolder),
+  log: createLog(config),
+  clock: () => new Date(),
+})
+
+function greet(address: string, signIns: string[]): void {
+  say(`Tautbook is ready at ${address}`)
+  if (signIns.length > 0) say(['Sign in to the demo company as', ...signIns].join('\n'))
 }
 
 /** Resolves at the first SIGINT or SIGTERM, or when the program that started this one is gone. */
