@@ -1,0 +1,33 @@
+import type { Hardware } from '@shared/schemas/hardware'
+import type { HouseRules } from '@shared/schemas/house-rules'
+import type { Units } from '@shared/schemas/quantities'
+import type { Survey } from '@shared/schemas/survey'
+import type { SurveyOperation } from '@shared/survey/survey-operation'
+
+/** What is in hand. A `rectangle` is the one of known size on the photo with this id. */
+export type Selection =
+  | { kind: 'none' }
+  | { kind: 'post' | 'bay' | 'run' | 'photo' | 'rectangle'; id: string }
+
+/** What panels and the table show. */
+export interface EditorView {
+  survey: Survey
+  selection: Selection
+  /** What may be chosen from: the company's hardware, retired entries left out. */
+  hardware: Hardware
+  rules: HouseRules
+  units: Units
+  /** Fractions of an inch on the keypad and in lengths. */
+  fraction: 16 | 32 | 64
+  person: { name: string }
+  canEdit: boolean
+}
+
+/** What panels and the table may do. */
+export interface EditorActions {
+  /** One gesture: applied at once, undone in one step. */
+  perform: (operation: SurveyOperation) => void
+  select: (selection: Selection) => void
+  undo: () => void
+  redo: () => void
+}
