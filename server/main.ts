@@ -53,11 +53,23 @@ function untilTold(): Promise<void> {
   })
 }
 
+const fileSentences: Record<string, (place: string) => string> = {
+  ENOSPC: (place) => `The disk that holds ${place} is full: free about 500 MB there, then start again.`,
+  EACCES: (place) => `This user may not use ${place}: allow it, or name another folder with TAUTBOOK_DATA.`,
+  EROFS: (place) => `${place} cannot be written: name another folder with TAUTBOOK_DATA.`,
+}
+
+function explainFileFailure(error: unknown): string | undefined {
+  const { code = '', path: place } = error as NodeJS.ErrnoException
+  return place === undefined ? undefined : fileSentences[code]?.(place)
+}
+
 /** Failures that somebody can mend get a sentence; anything else is a fault of ours and keeps its stack. */
 function explain(error: unknown, config: Config): string {
   return (
     explainDatabaseFailure(error, config.databaseUrl) ??
     explainListenFailure(error, config) ??
+    explainFileFailure(error) ??
     (error instanceof Error ? (error.stack ?? error.message) : String(error))
   )
 }

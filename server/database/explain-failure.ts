@@ -43,7 +43,6 @@ const aliases: Record<string, string> = {
   CONNECTION_CLOSED: 'ECONNREFUSED',
   CONNECTION_DESTROYED: 'ECONNREFUSED',
   ECONNRESET: 'ECONNREFUSED',
-  ENOSPC: '53100',
 }
 
 /** One sentence that says what is wrong, where, and what to do; undefined for what is no failure to reach or use it. */
