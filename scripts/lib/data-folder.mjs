@@ -10,6 +10,8 @@ const ROOM_BYTES = 100 * 2 ** 20
 export function openDataFolder(folder) {
   try {
     mkdirSync(folder, { recursive: true, mode: 0o711 })
+    // Others pass through the data folder to the database; the pictures of customers' homes are none of their business.
+    mkdirSync(join(folder, 'photos'), { recursive: true, mode: 0o700 })
     const probe = join(folder, `.probe-${process.pid}`)
     writeFileSync(probe, 'x')
     rmSync(probe)
