@@ -45,8 +45,14 @@ const aliases: Record<string, string> = {
   ECONNRESET: 'ECONNREFUSED',
 }
 
+const certificateCodes = /CERT|^UNABLE_TO_|^ERR_TLS/
+
 /** One sentence that says what is wrong, where, and what to do; undefined for what is no failure to reach or use it. */
 export function explainDatabaseFailure(error: unknown, url: string): string | undefined {
   const code = codeOf(innermost(error))
-  return sentences[aliases[code] ?? code]?.(describeDatabase(url))
+  const where = describeDatabase(url)
+  if (certificateCodes.test(code)) {
+    return `The certificate of the database ${where} is not trusted (${code}): correct sslmode in DATABASE_URL, or give the authority’s certificate with NODE_EXTRA_CA_CERTS.`
+  }
+  return sentences[aliases[code] ?? code]?.(where)
 }
