@@ -4,15 +4,20 @@ import { build } from 'esbuild'
 import { inRoot } from './root.mjs'
 
 rmSync(inRoot('dist', 'server'), { recursive: true, force: true })
-await build({
-  entryPoints: [inRoot('server', 'main.ts')],
-  outfile: inRoot('dist', 'server', 'main.js'),
-  bundle: true,
-  platform: 'node',
-  target: 'node20',
-  format: 'esm',
-  packages: 'external',
-  sourcemap: 'inline',
-  sourcesContent: false,
-  logLevel: 'warning',
-})
+try {
+  await build({
+    entryPoints: [inRoot('server', 'main.ts')],
+    outfile: inRoot('dist', 'server', 'main.js'),
+    bundle: true,
+    platform: 'node',
+    target: 'node20',
+    format: 'esm',
+    packages: 'external',
+    sourcemap: 'inline',
+    sourcesContent: false,
+    logLevel: 'warning',
+  })
+} catch {
+  // What is wrong was written already.
+  process.exitCode = 1
+}
