@@ -2,6 +2,9 @@ import { z } from 'zod'
 import { idSchema } from './id'
 import type { Quantities } from './quantities'
 
+/** Why a reading was struck. */
+export const strikeReasonSchema = z.string().max(200).regex(/\S/, 'expected the reason why it was struck')
+
 /** A reading: a figure at a place (the heights `guard.readAt`), who and when; struck with a reason, never erased. */
 export const makeReadingSchema = (q: Quantities) =>
   z.strictObject({
@@ -10,7 +13,7 @@ export const makeReadingSchema = (q: Quantities) =>
     value: q.positive,
     by: z.string().max(120).optional(),
     on: z.iso.datetime({ offset: true }).optional(),
-    struck: z.string().min(1).max(200).optional(),
+    struck: strikeReasonSchema.optional(),
   })
 
 export type Reading = z.infer<ReturnType<typeof makeReadingSchema>>

@@ -33,7 +33,11 @@ export function checkSurveyReferences(survey: Names, report: Report): void {
     needPost(diagonal.from, ['diagonals', i, 'from'])
     needPost(diagonal.to, ['diagonals', i, 'to'])
   })
-  survey.corners.forEach((corner, i) => needPost(corner.post, ['corners', i, 'post']))
+  survey.corners.forEach(({ post }, i) => {
+    needPost(post, ['corners', i, 'post'])
+    if (survey.corners.findIndex((corner) => corner.post === post) !== i)
+      report(['corners', i, 'post'], post, 'expected a post whose angle is not given above')
+  })
   survey.photos.forEach((photo, i) => {
     for (const id of Object.keys(photo.posts)) needPost(id, ['photos', i, 'posts', id])
   })
@@ -66,6 +70,14 @@ function checkChain(survey: Names, ids: string[], path: Path, report: Report): v
     if (bay.from !== at && bay.to !== at) {
       return report([...path, j], ids[j], `expected a bay that begins or ends at post ${at}`)
     }
+    const before = ends[j - 1]
+    if (before && bothMeet(before, bay)) {
+      return report([...path, j], ids[j], 'expected a bay that leads on, not back to the post before')
+    }
     at = bay.from === at ? bay.to : bay.from
   }
 }
+
+/** Two bays side by side, between the same two posts. */
+const bothMeet = (a: { from: string; to: string }, b: { from: string; to: string }): boolean =>
+  (a.from === b.from && a.to === b.to) || (a.from === b.to && a.to === b.from)

@@ -15,10 +15,22 @@ export const makeDiagonalSchema = (q: Quantities) =>
   z.strictObject({ id: idSchema, from: idSchema, to: idSchema, value: q.positive })
 export const cornerSchema = z.strictObject({ post: idSchema, angle: z.number().gt(0).max(180) })
 
+export const surveyTitleSchema = z.string().min(1).max(120)
+
 /** A diagonal, post centre to post centre. */
 export type Diagonal = z.infer<ReturnType<typeof makeDiagonalSchema>>
 /** The plan angle between two runs at a post, in degrees. */
 export type Corner = z.infer<typeof cornerSchema>
+
+/** How many of each a survey may have. */
+export const surveyLimits = {
+  posts: 1000,
+  bays: 1000,
+  runs: 1000,
+  diagonals: 200,
+  corners: 200,
+  photos: 100,
+} as const
 
 /** The measured description of a site, in the quantities given; every name in it must lead somewhere. */
 export const makeSurveySchema = (q: Quantities) =>
@@ -27,14 +39,14 @@ export const makeSurveySchema = (q: Quantities) =>
       format: z.literal('tautbook.survey'),
       version: z.literal(SURVEY_VERSION),
       units: unitsSchema,
-      title: z.string().min(1).max(120),
+      title: surveyTitleSchema,
       guard: makeGuardSchema(q).prefault({}),
-      posts: z.array(makePostSchema(q)).max(1000).default([]),
-      bays: z.array(makeBaySchema(q)).max(1000).default([]),
-      runs: z.array(makeRunSchema(q)).max(1000).default([]),
-      diagonals: z.array(makeDiagonalSchema(q)).max(200).default([]),
-      corners: z.array(cornerSchema).max(200).default([]),
-      photos: z.array(makePhotoSchema(q)).max(100).default([]),
+      posts: z.array(makePostSchema(q)).max(surveyLimits.posts).default([]),
+      bays: z.array(makeBaySchema(q)).max(surveyLimits.bays).default([]),
+      runs: z.array(makeRunSchema(q)).max(surveyLimits.runs).default([]),
+      diagonals: z.array(makeDiagonalSchema(q)).max(surveyLimits.diagonals).default([]),
+      corners: z.array(cornerSchema).max(surveyLimits.corners).default([]),
+      photos: z.array(makePhotoSchema(q)).max(surveyLimits.photos).default([]),
     })
     .superRefine((survey, context) =>
       checkSurveyReferences(survey, (path, input, message) =>

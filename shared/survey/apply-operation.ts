@@ -1,6 +1,6 @@
 import type { Reading } from '../schemas/bay'
 import type { Photo } from '../schemas/photo'
-import type { Corner, Survey } from '../schemas/survey'
+import { type Corner, type Survey, surveyLimits } from '../schemas/survey'
 import { checkSurveyReferences } from '../schemas/survey-references'
 import { assertNew, itemOf, placeOf, withChanged, withFields, withItem, withoutKey } from './lists'
 import { OperationRefused } from './operation-refused'
@@ -13,7 +13,7 @@ import type { OperationOf, ReadingOwner, SimpleOperation, SurveyOperation } from
  */
 export function applyOperation(survey: Survey, operation: SurveyOperation): Survey {
   const changed = applySteps(survey, operation.type === 'group' ? operation.operations : [operation])
-  assertHolds(changed)
+  assertHolds(survey, changed)
   return changed
 }
 
@@ -21,19 +21,38 @@ export function applyOperation(survey: Survey, operation: SurveyOperation): Surv
 export const applySteps = (survey: Survey, steps: readonly SimpleOperation[]): Survey =>
   steps.reduce(applySimple, survey)
 
-/** Every name in the survey leads somewhere. @throws OperationRefused `not-fitting` with the first that does not. */
-function assertHolds(survey: Survey): void {
+/**
+ * Every name in the survey leads somewhere, and no list is longer than a survey may have.
+ * @throws OperationRefused with the first fault: `still-used` when something was removed that is still named.
+ */
+function assertHolds(before: Survey, changed: Survey): void {
+  for (const [list, most] of Object.entries(surveyLimits)) {
+    if (changed[list as keyof typeof surveyLimits].length <= most) continue
+    throw new OperationRefused('not-fitting', `A survey has at most ${most} ${list}. Begin another survey.`)
+  }
   const faults: { path: PropertyKey[]; input: unknown; message: string }[] = []
-  checkSurveyReferences(survey, (path, input, message) => faults.push({ path, input, message }))
+  checkSurveyReferences(changed, (path, input, message) => faults.push({ path, input, message }))
   const fault = faults[0]
   if (!fault) return
   const [list, index] = fault.path
-  const owner = (survey[list as 'bays'] as { id?: string; post?: string }[])[Number(index)]
-  const noun = String(list).replace(/s$/, '')
-  throw new OperationRefused(
-    'not-fitting',
-    `This does not fit the survey: ${noun} ${owner?.id ?? owner?.post ?? ''} names ${String(fault.input)}; ${fault.message}.`,
-  )
+  const owner = (changed[list as 'bays'] as { id?: string; post?: string }[])[Number(index)]
+  const name = `${String(list).replace(/s$/, '')} ${owner?.id ?? owner?.post ?? ''}`
+  const removed = removedNoun(before, changed, fault.input)
+  throw removed
+    ? new OperationRefused(
+        'still-used',
+        `The ${removed} ${String(fault.input)} is still used by ${name}. Remove or change that as well.`,
+      )
+    : new OperationRefused(
+        'not-fitting',
+        `This does not fit the survey: ${name} names ${String(fault.input)}; ${fault.message}.`,
+      )
+}
+
+function removedNoun(before: Survey, changed: Survey, id: unknown): string | undefined {
+  const has = (list: readonly { id: string }[]) => list.some((item) => item.id === id)
+  if (has(before.posts) && !has(changed.posts)) return 'post'
+  return has(before.bays) && !has(changed.bays) ? 'bay' : undefined
 }
 
 type Handlers = {
@@ -131,7 +150,7 @@ const handlers: Handlers = {
     withPhoto(survey, photo, (known) => ({ ...known, posts: { ...known.posts, [post]: mark } })),
   'photo.unmark': (survey, { photo, post }) =>
     withPhoto(survey, photo, (known) => {
-      if (!known.posts[post]) {
+      if (!Object.hasOwn(known.posts, post)) {
         throw new OperationRefused('not-there', `Post ${post} is not marked on photo ${photo}.`)
       }
       return { ...known, posts: withoutKey(known.posts, post) }

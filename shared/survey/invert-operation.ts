@@ -1,3 +1,4 @@
+import type { Photo, PostMark } from '../schemas/photo'
 import type { Survey } from '../schemas/survey'
 import { applySteps, cornerPlace } from './apply-operation'
 import type { Reading } from '../schemas/bay'
@@ -93,11 +94,11 @@ const inverters: Inverters = {
     index: placeOf(photos, id, 'photo'),
   }),
   'photo.mark': ({ photos }, { photo, post }) => {
-    const mark = itemOf(photos, photo, 'photo').posts[post]
+    const mark = markOf(itemOf(photos, photo, 'photo'), post)
     return mark ? { type: 'photo.mark', photo, post, mark } : { type: 'photo.unmark', photo, post }
   },
   'photo.unmark': ({ photos }, { photo, post }) => {
-    const mark = itemOf(photos, photo, 'photo').posts[post]
+    const mark = markOf(itemOf(photos, photo, 'photo'), post)
     if (!mark) throw new OperationRefused('not-there', `Post ${post} is not marked on photo ${photo}.`)
     return { type: 'photo.mark', photo, post, mark }
   },
@@ -136,6 +137,10 @@ function rectangleBack({ photos }: Survey, photo: string): SimpleOperation {
     ? { type: 'photo.setRectangle', photo, rectangle }
     : { type: 'photo.clearRectangle', photo }
 }
+
+/** A post may be called as something every object has, such as `constructor`. */
+const markOf = ({ posts }: Photo, post: string): PostMark | undefined =>
+  Object.hasOwn(posts, post) ? posts[post] : undefined
 
 function readingsOf({ bays, runs }: Survey, { kind, id }: ReadingOwner): Reading[] {
   return (kind === 'bay' ? itemOf(bays, id, 'bay') : itemOf(runs, id, 'run')).readings

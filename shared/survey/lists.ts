@@ -54,3 +54,8 @@ export function withoutKey<Thing extends object>(thing: Thing, key: keyof Thing)
   delete changed[key]
   return changed
 }
+
+/** @throws OperationRefused `not-there` with the first id that the list lacks. */
+export function assertAllThere(list: readonly { id: string }[], ids: readonly string[], noun: string): void {
+  for (const id of ids) itemOf(list, id, noun)
+}

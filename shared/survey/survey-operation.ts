@@ -1,12 +1,12 @@
 import { z } from 'zod'
-import { makeBaySchema, makeReadingSchema } from '../schemas/bay'
+import { makeBaySchema, makeReadingSchema, strikeReasonSchema } from '../schemas/bay'
 import { makeGuardSchema } from '../schemas/guard'
 import { idSchema } from '../schemas/id'
 import { makePhotoSchema, makeRectangleSchema, postMarkSchema } from '../schemas/photo'
 import { makePostSchema } from '../schemas/post'
 import { storedQuantities as q, unitsSchema } from '../schemas/quantities'
 import { makeRunSchema } from '../schemas/run'
-import { cornerSchema, makeDiagonalSchema } from '../schemas/survey'
+import { cornerSchema, makeDiagonalSchema, surveyTitleSchema } from '../schemas/survey'
 import { fieldChanges } from './field-changes'
 
 /** Where something stands in its list, so that undo puts it back there; at the end when left out. */
@@ -34,7 +34,7 @@ export const simpleOperationSchema = z.discriminatedUnion('type', [
   named('run.remove', { id }),
   named('run.set', { id, ...fieldChanges(runFields) }),
   named('reading.add', { of, reading: makeReadingSchema(q), index }),
-  named('reading.strike', { of, id, reason: z.string().trim().min(1).max(200) }),
+  named('reading.strike', { of, id, reason: strikeReasonSchema }),
   /** The opposite of striking. */
   named('reading.restore', { of, id }),
   /** The opposite of adding, for undo in the same hand; the history keeps the reading. */
@@ -50,7 +50,7 @@ export const simpleOperationSchema = z.discriminatedUnion('type', [
   named('photo.setRectangle', { photo: idSchema, rectangle: makeRectangleSchema(q) }),
   named('photo.clearRectangle', { photo: idSchema }),
   named('guard.set', fieldChanges(makeGuardSchema(q).shape)),
-  named('survey.set', fieldChanges({ title: z.string().trim().min(1).max(120), units: unitsSchema })),
+  named('survey.set', fieldChanges({ title: surveyTitleSchema, units: unitsSchema })),
 ])
 export type SimpleOperation = z.infer<typeof simpleOperationSchema>
 
