@@ -1,10 +1,10 @@
 import path from 'node:path'
 import express, { type Express, Router } from 'express'
 import helmet from 'helmet'
-import { pinoHttp } from 'pino-http'
 import { protectFromForgery } from './http/csrf'
 import { errorHandler, nothingHere } from './http/error-handler'
 import { generalLimit } from './http/rate-limit'
+import { requestLog } from './http/request-log'
 import { sessions } from './http/sessions'
 import type { Services } from './services'
 import { featureRoutes } from './features/routes'
@@ -15,7 +15,7 @@ export function createApp(services: Services): Express {
   const app = express()
   app.disable('x-powered-by')
   app.set('trust proxy', config.trustProxy ? 1 : false)
-  app.use(pinoHttp({ logger: log, autoLogging: { ignore: (request) => request.url === '/api/health' } }))
+  app.use(requestLog(log))
   app.use(helmet(securityHeaders(config.secureCookies)))
 
   const api = Router()
@@ -49,6 +49,7 @@ const securityHeaders = (https: boolean) => ({
       imgSrc: ["'self'", 'blob:', 'data:'],
       // Konva and Radix place things by style attributes.
       styleSrc: ["'self'", "'unsafe-inline'"],
+      fontSrc: ["'self'"],
       objectSrc: ["'none'"],
       frameAncestors: ["'none'"],
       upgradeInsecureRequests: https ? [] : null,

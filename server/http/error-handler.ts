@@ -3,6 +3,7 @@ import { MulterError } from 'multer'
 import type { Logger } from 'pino'
 import type { Problem } from '@shared/schemas/problem'
 import { AppError, notFound } from '../errors'
+import { loggablePath } from '../log'
 
 /** The one writer of refusals: problem+json for people and programs, the rest for the log. */
 export function errorHandler(log: Logger): ErrorRequestHandler {
@@ -12,7 +13,7 @@ export function errorHandler(log: Logger): ErrorRequestHandler {
       code: known.code,
       status: known.status,
       method: request.method,
-      path: request.path,
+      path: loggablePath(request.originalUrl),
       detail: known.log,
     }
     if (known.status >= 500) log.error({ ...entry, err: error }, 'request failed')

@@ -28,6 +28,16 @@ export const guessLimit = (): RequestHandler =>
     handler: (_request, _response, next) => next(tooMany('15 minutes')),
   })
 
+/** For companies: each costs a password hash and rows that stay, so those that succeed count too. */
+export const registerLimit = (): RequestHandler =>
+  rateLimit({
+    windowMs: 60 * MINUTE,
+    limit: 30,
+    standardHeaders: 'draft-8',
+    legacyHeaders: false,
+    handler: (_request, _response, next) => next(tooMany('an hour')),
+  })
+
 /** For guessing one person's password from many addresses. */
 export const emailLimit = (): RequestHandler =>
   rateLimit({

@@ -25,7 +25,7 @@ export interface Call<Params, Query, Body> {
 
 /**
  * Registers the handler of an endpoint. Every request passes the same checklist, in this order:
- * limit (before, in `app.ts`) → person → valid → allowed → handler, which calls a service → present.
+ * limit (before, in `app.ts`) → person → allowed → valid → handler, which calls a service → present.
  * A handler that answers by itself (a file) returns `undefined` after doing so.
  *
  * To add an endpoint: describe it in `shared/endpoints`, then call this in the feature's `X.routes.ts`.
@@ -58,7 +58,7 @@ export function route<
       request,
       response,
     }
-    present(endpoint, response, await handle(call))
+    present({ endpoint, response, checked: services.config.mode !== 'production' }, await handle(call))
   }
   router[method](endpoint.path, gate, ...before, answer)
 }
@@ -71,12 +71,20 @@ function requirePerson(endpoint: Endpoint, person: SignedIn | undefined): void {
   if (!can(person, endpoint.gate, person)) throw notAllowed(`${person.id} lacks ${endpoint.gate}`)
 }
 
-function present(endpoint: Endpoint, response: Response, answer: unknown): void {
+interface Answering {
+  endpoint: Endpoint
+  response: Response
+  /** Whether the answer must prove that it is what the endpoint promises: everywhere but in production. */
+  checked: boolean
+}
+
+function present({ endpoint, response, checked }: Answering, answer: unknown): void {
   if (response.headersSent || response.writableEnded) return
   if (endpoint.response === undefined) {
     response.status(endpoint.status ?? 204).end()
     return
   }
+  if (checked) endpoint.response.parse(answer)
   response.status(endpoint.status ?? 200).json(answer)
 }
 

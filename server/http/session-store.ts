@@ -1,7 +1,13 @@
 import { createHash } from 'node:crypto'
 import { type SessionData, Store } from 'express-session'
 import type { Database } from '../database/client'
-import { deleteSession, extendSession, selectSession, upsertSession } from './session-store.queries'
+import {
+  deleteExpiredSessions,
+  deleteSession,
+  extendSession,
+  selectSession,
+  upsertSession,
+} from './session-store.queries'
 import { toSignedIn } from './account'
 import './signed-in'
 
@@ -30,7 +36,11 @@ export class SessionStore extends Store {
     this.read(id).then((session) => done(null, session), done)
   }
 
+  /** When sessions that have ended were last cleared away. */
+  private sweptAt = 0
+
   override set(id: string, session: SessionData, done?: Done): void {
+    this.sweepNowAndThen()
     const { account: _account, ...data } = session as Passported
     const user = data.passport?.user
     upsertSession(this.database, {
@@ -66,6 +76,14 @@ export class SessionStore extends Store {
     session.expiresAt = row.session.expiresAt.getTime()
     if (row.person && row.company) session.account = toSignedIn(row.person, row.company)
     return session
+  }
+
+  private sweepNowAndThen(): void {
+    const now = this.clock()
+    if (now.getTime() - this.sweptAt < HOUR) return
+    this.sweptAt = now.getTime()
+    // What fails now is done an hour later; nobody waits for it.
+    deleteExpiredSessions(this.database, now).catch(() => undefined)
   }
 
   private expiry(signedIn: boolean): Date {

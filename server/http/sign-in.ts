@@ -1,7 +1,7 @@
 import type { Request, Response } from 'express'
-import passport from 'passport'
 import { Strategy } from 'passport-local'
 import { AppError } from '../errors'
+import { serverPassport } from './passport'
 import type { SignedIn } from './signed-in'
 
 const wrong = () =>
@@ -18,15 +18,13 @@ export function signInWithPassword(
       check(email, password).then((person) => done(null, person ?? false), done)
     },
   )
-  const local = new passport.Passport()
-  local.use(strategy)
   return new Promise((resolve, reject) => {
     const answer = (error: unknown, person?: SignedIn | false) => {
       if (error) reject(error instanceof Error ? error : new Error(String(error)))
       else if (person) resolve(person)
       else reject(wrong())
     }
-    const authenticate = local.authenticate('local', { session: false }, answer) as (
+    const authenticate = serverPassport.authenticate(strategy, { session: false }, answer) as (
       request: Request,
       response: Response,
       next: (error?: unknown) => void,

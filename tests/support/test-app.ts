@@ -34,7 +34,7 @@ export function createTestApp({
     open,
     database: open.database,
     photoStorage: memoryPhotoStorage(),
-    log: pino({ level: 'silent' }),
+    log: pino({ level: process.env['TEST_LOG'] ?? 'silent' }),
     clock,
   }
   return { app: createApp(services), services }

@@ -1,6 +1,6 @@
 import type { Router } from 'express'
 import { accounts } from '@shared/endpoints/accounts'
-import { guessLimit } from '../../http/rate-limit'
+import { registerLimit } from '../../http/rate-limit'
 import { route } from '../../http/route'
 import { beginSession } from '../../http/session-of-request'
 import type { Services } from '../../services'
@@ -13,7 +13,7 @@ export function companyRoutes(router: Router, services: Services): void {
     at,
     accounts.registerCompany,
     async ({ body, request }) => beginSession(request, await registerCompany(database, body)),
-    [guessLimit()],
+    [registerLimit()],
   )
   route(at, accounts.readCompany, ({ companyId }) => readCompany(database, companyId))
   route(at, accounts.changeCompany, ({ companyId, body }) => changeCompany(database, companyId, body))

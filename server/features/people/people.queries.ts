@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, sql } from 'drizzle-orm'
+import { and, asc, eq, gt } from 'drizzle-orm'
 import type { Database } from '../../database/client'
 import { companies, invitations, people } from '../../database/tables/index'
 
@@ -26,20 +26,12 @@ export const lockPeople = (transaction: Database, companyId: string): Promise<Pe
     .orderBy(asc(people.id))
     .for('update')
 
-export async function emailInUse(database: Database, email: string): Promise<boolean> {
-  const rows = await database
-    .select({ id: people.id })
-    .from(people)
-    .where(eq(sql`lower(${people.email})`, email.toLowerCase()))
-  return rows.length > 0
-}
-
+/** Adds a person; undefined when the e-mail address signs in somewhere already. */
 export async function insertPerson(
   database: Database,
   person: typeof people.$inferInsert,
-): Promise<PersonRow> {
-  const [row] = await database.insert(people).values(person).returning()
-  if (!row) throw new Error('A person was inserted and no row came back.')
+): Promise<PersonRow | undefined> {
+  const [row] = await database.insert(people).values(person).onConflictDoNothing().returning()
   return row
 }
 

@@ -8,7 +8,6 @@ import { makeInvitation } from './invitations.service'
 import { emailTaken, lastOwner } from './people.errors'
 import {
   deleteInvitationsOf,
-  emailInUse,
   insertPerson,
   lockPeople,
   type PersonKey,
@@ -35,8 +34,8 @@ export async function invitePerson(
   link: { now: Date; address: string },
 ) {
   return database.transaction(async (transaction) => {
-    if (await emailInUse(transaction, person.email)) throw emailTaken()
     const row = await insertPerson(transaction, { ...person, roles: [...new Set(roles)] })
+    if (!row) throw emailTaken()
     return { person: presentPerson(row), ...(await makeInvitation(transaction, row, link)) }
   })
 }
@@ -59,8 +58,9 @@ export async function addOwner(
   transaction: Database,
   person: NewPerson & { passwordHash: string },
 ): Promise<PersonRow> {
-  if (await emailInUse(transaction, person.email)) throw emailTaken()
-  return insertPerson(transaction, { ...person, roles: ['owner'] })
+  const owner = await insertPerson(transaction, { ...person, roles: ['owner'] })
+  if (!owner) throw emailTaken()
+  return owner
 }
 
 /** Changes a person's name or roles, disables or enables them; whoever is disabled is signed out everywhere. */
