@@ -1,6 +1,7 @@
 import type { CutListRow } from '@shared/cut-list/cut-list-rows'
 import type { WhyNone } from '@shared/calculation/result'
 import type { Finding } from '@shared/schemas/finding'
+import { formatLength, lengthText } from '@shared/units/format-length'
 import { toInches, toMillimetres } from '@shared/units/length'
 import type { CutListDocument } from './cut-list-document'
 
@@ -13,6 +14,8 @@ export interface CutListLine {
   mode: 'shop' | 'site' | 'none'
   /** Cut length of a *shop* cable, shop length of a *site* cable. */
   length?: number
+  /** The same in feet and inches, as a long tape reads; for inch surveys. */
+  feet?: string
   /** Bare length once the second end of a *site* cable is finished. */
   finish?: number
   from: string
@@ -49,6 +52,7 @@ function toLine(row: CutListRow, findings: Finding[], units: CutListDocument['un
     height: inUnits(cable.height, units),
     mode: cable.mode,
     length: written(cable.cut),
+    feet: units === 'in' ? feetText(cable.cut) : undefined,
     finish: written(cable.finish),
     from: end(row.fromPost, row.fromFitting),
     to: end(row.toPost, row.toFitting),
@@ -58,6 +62,9 @@ function toLine(row: CutListRow, findings: Finding[], units: CutListDocument['un
     note: note(row, findings),
   }
 }
+
+const feetText = (nm: number | undefined): string | undefined =>
+  nm === undefined ? undefined : lengthText(formatLength(nm, { style: 'feet', finest: 64 }))
 
 const end = (post: string, fitting: string | undefined): string => (fitting ? `${post}: ${fitting}` : post)
 

@@ -15,6 +15,12 @@ export function addCutListSheet(workbook: Workbook, document: CutListDocument): 
   })
 }
 
+const feetColumn: SheetColumn<CutListLine> = {
+  header: 'In feet and inches',
+  value: ({ feet }) => feet,
+  widest: 16,
+}
+
 function cutListColumns(document: CutListDocument, lines: CutListLine[]): SheetColumn<CutListLine>[] {
   const unit = document.units
   const takeUp = takeUpFormat(document)
@@ -31,6 +37,7 @@ function cutListColumns(document: CutListDocument, lines: CutListLine[]): SheetC
     { header: `Height (${unit})`, value: height, widest: 10, format: exactly(height) },
     { header: 'Mode', value: ({ mode }) => mode, widest: 8 },
     { header: `Cut or shop length (${unit})`, value: length, widest: 12, format: exactly(length) },
+    ...(unit === 'in' ? [feetColumn] : []),
     {
       header: `Finish mark (${unit})`,
       value: ({ finish }) => finish,

@@ -11,6 +11,8 @@ import { MAX_BYTES } from './prepare-photo'
 /** In memory, so that nothing lies about on disk whatever becomes of the upload. */
 const upload = multer({
   storage: memoryStorage(),
+  // Browsers write names in UTF-8.
+  defParamCharset: 'utf8',
   limits: { fileSize: MAX_BYTES, files: 1, fields: 4, parts: 6, fieldSize: 1000, headerPairs: 50 },
 }).single('photo')
 

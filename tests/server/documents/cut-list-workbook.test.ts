@@ -33,17 +33,17 @@ describe('the workbook of the worked example', () => {
       'Height (in)',
       'Mode',
       'Cut or shop length (in)',
-      'Finish mark (in)',
+      'In feet and inches',
     ])
     const cables = rows.filter((row) => row[0] === 'R1')
     expect(cables).toHaveLength(11)
     expect(cables[0]?.[2]).toBe(2.875)
     expect(cables[10]?.[2]).toBe(31.625)
-    expect(cables[9]?.slice(3, 6)).toEqual(['shop', 95.75, null])
+    expect(cables[9]?.slice(3, 7)).toEqual(['shop', 95.75, `7' 11 3/4"`, null])
     expect(cables[10]?.[4]).toBe(95.8125)
-    expect(cables[9]?.[9]).toBeCloseTo(0.3714951, 6)
-    expect(cables[9]?.[10]).toBeCloseTo(0.5150783, 6)
-    expect(cables[9]?.[11]).toBe(1.275)
+    expect(cables[9]?.[10]).toBeCloseTo(0.3714951, 6)
+    expect(cables[9]?.[11]).toBeCloseTo(0.5150783, 6)
+    expect(cables[9]?.[12]).toBe(1.275)
   })
 
   it('counts two fittings per cable and adds up the cable', async () => {
@@ -61,7 +61,7 @@ describe('the workbook of the worked example', () => {
     const rows = (await readBack(cutListDocument(input))).get('Cut list') ?? []
     expect(rows[1]?.[3]).toBe('none')
     expect(rows[1]?.[4]).toBeNull()
-    expect(rows[1]?.[12]).toMatch(/a reading or size is missing/)
+    expect(rows[1]?.[13]).toMatch(/a reading or size is missing/)
   })
 })
 
@@ -125,9 +125,9 @@ describe('text that a spreadsheet could run', () => {
     input.hardware.cables[0]!.name = '=HYPERLINK("http://example.com")'
     input.hardware.fittings[0]!.name = '@SUM(A1)'
     const sheets = await readBack(cutListDocument(input))
-    expect(sheets.get('Cut list')?.[1]?.[6]).toBe('\'=HYPERLINK("http://example.com")')
+    expect(sheets.get('Cut list')?.[1]?.[7]).toBe('\'=HYPERLINK("http://example.com")')
     expect(sheets.get('Fittings to pick')?.[1]?.[2]).toBe("'@SUM(A1)")
     const sheet = await setUp(cutListDocument(input))
-    expect(sheet.getCell('G2').formula).toBeUndefined()
+    expect(sheet.getCell('H2').formula).toBeUndefined()
   })
 })
