@@ -24,6 +24,7 @@ await runScript(async () => {
       DATABASE_URL: cluster.url(),
       TAUTBOOK_DATA: dataFolder,
       TAUTBOOK_DEMO: 'yes',
+      PUBLIC_URL: '',
       SESSION_SECRET: 'only-for-browser-tests-on-this-machine',
       LOG_LEVEL: process.env.LOG_LEVEL ?? 'warn',
     })
