@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import { AppError } from '../errors'
+import { findUnstorable } from './unstorable'
 
 type Part = 'params' | 'query' | 'body'
 
@@ -14,6 +15,7 @@ export function validate<Schema extends z.ZodType>(
 ): Schema extends z.ZodType ? z.output<Schema> : undefined
 export function validate(schema: z.ZodType | undefined, value: unknown, part: Part): unknown {
   if (schema === undefined) return undefined
+  refuseUnstorable(value)
   const parsed = schema.safeParse(value)
   if (parsed.success) return parsed.data
   const fields = parsed.error.issues.map((issue) => ({
@@ -29,6 +31,15 @@ export function validate(schema: z.ZodType | undefined, value: unknown, part: Pa
       ? `${first.path === '' ? 'The request' : first.path}: ${first.message}`
       : `${fields.length} fields need another look; each says what.`
   throw new AppError(400, 'not-valid', detail, { fields })
+}
+
+function refuseUnstorable(value: unknown): void {
+  const path = findUnstorable(value)
+  if (path === undefined) return
+  const message = 'This text holds a character that cannot be kept. Type it again.'
+  throw new AppError(400, 'not-valid', `${path === '' ? 'The request' : path}: ${message}`, {
+    fields: [{ path, message }],
+  })
 }
 
 const sentence = (issue: z.core.$ZodIssue): string =>

@@ -20,7 +20,7 @@ const receivePhoto: RequestHandler = (request, response, next) => {
   upload(request, response, (error: unknown) => {
     if (error === undefined || error === null) return next()
     if (error instanceof MulterError && error.code === 'LIMIT_FILE_SIZE') return next(photoTooLarge())
-    next(uploadBroken(error instanceof Error ? error.message : String(error)))
+    next(uploadBroken(error instanceof Error ? error.message : 'not an error'))
   })
 }
 

@@ -58,6 +58,9 @@ export async function listJobSurveys(
   return rows.map((row) => ({ ...row, updatedAt: row.updatedAt.toISOString() }))
 }
 
+/** The largest number that the database's revision can hold. */
+const MAX_REVISION = 2_147_483_647
+
 /** A page of a survey's changes, the newest first. */
 export async function readHistory(
   database: Database,
@@ -65,7 +68,8 @@ export async function readHistory(
   page: { before?: number; limit: number },
 ): Promise<{ entries: SurveyHistoryEntry[]; next: number | null }> {
   if (!(await selectSurvey(database, key))) throw noSuchSurvey()
-  const rows = await selectHistory(database, key, { ...page, limit: page.limit + 1 })
+  const before = page.before === undefined ? undefined : Math.min(page.before, MAX_REVISION)
+  const rows = await selectHistory(database, key, { before, limit: page.limit + 1 })
   const entries = rows
     .slice(0, page.limit)
     .map(({ revision, changeId, operation, personName, at }): SurveyHistoryEntry => ({

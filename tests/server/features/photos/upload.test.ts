@@ -36,10 +36,10 @@ const file = (bytes: Buffer, more: Partial<File> = {}): File => ({
 })
 const upload = (...attach: File[]) => client.send(surveys.addPhoto, { params: { surveyId }, attach })
 const refusal = async (...attach: File[]) => {
-  const { status, body } = await upload(...attach)
+  const answer = await upload(...attach)
   expect(await database.database.select().from(photos)).toEqual([])
   expect(test.services.photoStorage.keys()).toEqual([])
-  return { status, ...(body as { code: string; detail: string }) }
+  return { status: answer.status, ...(answer.body as { code: string; detail: string }) }
 }
 
 describe('uploading a photo', () => {
@@ -48,8 +48,8 @@ describe('uploading a photo', () => {
     const answer = await upload(file(bytes, { fileName: 'mill-stair.jpg' }))
     expect(answer.status).toBe(201)
     expect(answer.body as PhotoRecord).toMatchObject({ width: 1500, height: 2000, name: 'mill-stair.jpg' })
-    const { body } = await client.send(surveys.readSurvey, { params: { surveyId } })
-    expect((body as SurveyRecord).photos).toEqual([answer.body])
+    const read = await client.send(surveys.readSurvey, { params: { surveyId } })
+    expect((read.body as SurveyRecord).photos).toEqual([answer.body])
   })
 
   it('takes names in any script', async () => {

@@ -190,6 +190,7 @@ describe('the history', () => {
     const first = await readHistory(test.database, key(), { limit: 2 })
     expect(first.entries.map(({ revision }) => revision)).toEqual([5, 4])
     const second = await readHistory(test.database, key(), { limit: 3, before: first.next! })
+    expect((await readHistory(test.database, key(), { limit: 9, before: 1e15 })).entries).toHaveLength(5)
     expect(second).toMatchObject({ entries: [{ revision: 3 }, { revision: 2 }, { revision: 1 }], next: null })
   })
 

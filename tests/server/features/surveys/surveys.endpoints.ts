@@ -78,8 +78,8 @@ export const cases: EndpointCase[] = [
     }),
     works: async ({ answer, client, sent }) => {
       expect(answer.body).toEqual({ revision: 1 })
-      const { body } = await client.send(surveys.readSurvey, { params: sent.params })
-      expect((body as SurveyRecord).survey.posts.map(({ id }) => id)).toContain('P9')
+      const read = await client.send(surveys.readSurvey, { params: sent.params })
+      expect((read.body as SurveyRecord).survey.posts.map(({ id }) => id)).toContain('P9')
     },
     otherCompany: 'not found',
   },
