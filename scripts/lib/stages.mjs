@@ -8,12 +8,11 @@ import { run } from './run-command.mjs'
 
 const LIMIT_MS = 8 * 60_000
 
+/** Without colours, which some programs switch on by the mere presence of `FORCE_COLOR`. */
+const { FORCE_COLOR: _, ...plain } = process.env
+
 const node = (args, env = {}) =>
-  run(process.execPath, args, {
-    cwd: root,
-    env: { ...process.env, FORCE_COLOR: '0', ...env },
-    timeout: LIMIT_MS,
-  })
+  run(process.execPath, args, { cwd: root, env: { ...plain, NO_COLOR: '1', ...env }, timeout: LIMIT_MS })
 
 /** Outside of `test-results`, which Playwright empties. */
 const reportOf = (name) => inRoot('.cache', `${name}.json`)
