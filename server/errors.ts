@@ -35,3 +35,7 @@ export const notAllowed = (log: string) =>
 /** Also what another company's things look like: whether they exist is not told. */
 export const notFound = (what: string) =>
   new AppError(404, 'not-found', `There is no such ${what}. It may have been removed, or the link is wrong.`)
+
+/** Whatever was thrown, as an error. */
+export const asError = (thrown: unknown): Error =>
+  thrown instanceof Error ? thrown : new Error('Something was thrown that is no error.', { cause: thrown })

@@ -1,6 +1,7 @@
 import type { Request, Response } from 'express'
 import type { Session } from '@shared/schemas/session'
 import type { Config } from '../config'
+import { asError } from '../errors'
 import { csrfToken } from './csrf'
 import { hashSessionId } from './session-store'
 import { cookieName } from './sessions'
@@ -39,5 +40,3 @@ export async function endSession(request: Request, response: Response, config: C
     path: '/',
   })
 }
-
-const asError = (error: unknown): Error => (error instanceof Error ? error : new Error(String(error)))

@@ -49,11 +49,17 @@ export class SessionStore extends Store {
       personId: user?.id ?? null,
       data,
       expiresAt: this.expiry(user !== undefined),
-    }).then(() => done?.(), done)
+    }).then(
+      () => done?.(),
+      (error: unknown) => done?.(error),
+    )
   }
 
   override destroy(id: string, done?: Done): void {
-    deleteSession(this.database, hashSessionId(id)).then(() => done?.(), done)
+    deleteSession(this.database, hashSessionId(id)).then(
+      () => done?.(),
+      (error: unknown) => done?.(error),
+    )
   }
 
   /** Called with every answer; the row is written at most once an hour. */

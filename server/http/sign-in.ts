@@ -1,6 +1,6 @@
 import type { Request, Response } from 'express'
 import { Strategy } from 'passport-local'
-import { AppError } from '../errors'
+import { AppError, asError } from '../errors'
 import { serverPassport } from './passport'
 import type { SignedIn } from './signed-in'
 
@@ -20,7 +20,7 @@ export function signInWithPassword(
   )
   return new Promise((resolve, reject) => {
     const answer = (error: unknown, person?: SignedIn | false) => {
-      if (error) reject(error instanceof Error ? error : new Error(String(error)))
+      if (error) reject(asError(error))
       else if (person) resolve(person)
       else reject(wrong())
     }

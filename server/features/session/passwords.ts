@@ -3,7 +3,7 @@ import bcrypt from 'bcryptjs'
 import { AppError } from '../../errors'
 
 /** Work factor: OWASP asks for at least 10. */
-const COST = process.env['NODE_ENV'] === 'test' ? 10 : 11
+const COST = 11
 
 const commonest = new Set(dictionary['passwords-common'])
 
