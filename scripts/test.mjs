@@ -5,7 +5,7 @@ const { runScript, say } = await import('./lib/script.mjs')
 const { installPackages } = await import('./lib/packages.mjs')
 const { groups, stageNames } = await import('./lib/stages.mjs')
 const { goOn } = await import('./lib/run-command.mjs')
-const { Stopped, Trouble } = await import('./lib/trouble.mjs')
+const { report, Stopped, Trouble } = await import('./lib/trouble.mjs')
 
 const AT_ONCE = 2
 
@@ -41,11 +41,23 @@ async function runGroup(group, names) {
   return results
 }
 
+/** Without packages nothing can be tested, which is one failure. */
+async function runAll(names) {
+  const results = []
+  try {
+    await installPackages({ say })
+  } catch (error) {
+    if (error instanceof Stopped) throw error
+    report(error)
+    return [{ passed: 0, failed: 1 }]
+  }
+  for (const group of groups) results.push(...(await runGroup(group, names)))
+  return results
+}
+
 await runScript(async () => {
   const names = chosenStages(process.argv.slice(2))
-  await installPackages({ say })
-  const results = []
-  for (const group of groups) results.push(...(await runGroup(group, names)))
+  const results = await runAll(names)
   const sum = (key) => results.reduce((total, result) => total + result[key], 0)
   say(`\n${sum('passed')} passed, ${sum('failed')} failed`)
   return sum('failed') === 0 && results.length > 0 ? 0 : 1
