@@ -23,5 +23,6 @@ export function addFindingsSheet(workbook: Workbook, document: CutListDocument):
       { header: 'Code', value: ({ code }) => code, widest: 26 },
     ],
     lines,
+    closing: lines.length === 0 ? ['Nothing was noticed.'] : [],
   })
 }

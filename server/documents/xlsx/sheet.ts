@@ -1,6 +1,6 @@
 import type { Alignment, Border, Column, Workbook, Worksheet } from 'exceljs'
 import { type CutListDocument, SHORT_CAUTION } from '../cut-list-document'
-import { safeText } from '../safe-text'
+import { safeText, writableText } from '../safe-text'
 
 export type CellValue = string | number | undefined
 
@@ -32,7 +32,7 @@ export function addTable<Line>(workbook: Workbook, document: CutListDocument, ta
   const sheet = workbook.addWorksheet(table.name, { views: [{ state: 'frozen', ySplit: 1, xSplit: 0 }] })
   sheet.columns = table.columns.map((column) => sheetColumn(column))
   const rows = table.lines.map((line) => table.columns.map((column) => column.value(line)))
-  sheet.addRows(rows.map((row) => row.map((value) => (typeof value === 'string' ? safeText(value) : value))))
+  sheet.addRows(rows.map((row) => row.map(cellValue)))
   drawWidths(sheet, table.columns, rows)
   styleHeader(sheet, table.columns.length)
   if (table.group) ruleGroups(sheet, table.lines.map(table.group), table.columns.length)
@@ -42,6 +42,12 @@ export function addTable<Line>(workbook: Workbook, document: CutListDocument, ta
   }
   setUpPrint(sheet, document, table.name)
   return sheet
+}
+
+/** An empty text is an empty cell. */
+const cellValue = (value: CellValue): CellValue => {
+  if (typeof value !== 'string') return value
+  return value === '' ? undefined : safeText(value)
 }
 
 function sheetColumn<Line>({ header, format, wrap }: SheetColumn<Line>): Partial<Column> {
@@ -74,7 +80,7 @@ function drawWidths<Line>(sheet: Worksheet, columns: SheetColumn<Line>[], rows: 
 
 function styleHeader(sheet: Worksheet, columns: number): void {
   const header = sheet.getRow(1)
-  header.height = 32
+  header.height = 46
   for (let i = 1; i <= columns; i += 1) {
     const cell = header.getCell(i)
     cell.font = { ...FONT, bold: true }
@@ -96,7 +102,7 @@ function ruleGroups(sheet: Worksheet, groups: string[], columns: number): void {
 
 /** In a header or footer `&` begins a code; doubled it is itself. The whole may have 255 characters. */
 const headerText = (text: string, longest: number): string =>
-  safeText(text.replace(/[\r\n\t]+/g, ' '))
+  writableText(text.replace(/[\r\n\t]+/g, ' '))
     .slice(0, longest)
     .replaceAll('&', '&&')
 

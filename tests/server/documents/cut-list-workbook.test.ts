@@ -55,6 +55,16 @@ describe('the workbook of the worked example', () => {
     expect(cable?.[4]).toBe(total)
   })
 
+  it('has findings as rows, or says that there is none', async () => {
+    const none = (await readBack(cutListDocument(workedExample()))).get('Findings') ?? []
+    expect(none.at(-1)?.[0]).toBe('Nothing was noticed.')
+    const input = workedExample()
+    input.survey.bays[1]!.readings = []
+    const [, first] = (await readBack(cutListDocument(input))).get('Findings') ?? []
+    expect(first?.slice(0, 2)).toEqual(['stop', 'R1'])
+    expect(first?.[5]).toMatch(/bay B2 has no reading/)
+  })
+
   it('says of a cable without a length why it has none', async () => {
     const input = workedExample()
     input.survey.bays[1]!.readings = []
@@ -113,6 +123,8 @@ describe('print set-up', () => {
     expect(oddFooter?.length).toBeLessThanOrEqual(255)
     const { headerFooter } = await setUp(cutListDocument(workedExample(), { jobTitle: 'Ash & Elm' }))
     expect(headerFooter.oddHeader).toContain('Job 1042  Ash && Elm')
+    const minus = await setUp(cutListDocument(workedExample(), { jobTitle: '-Ash' }))
+    expect(minus.headerFooter.oddHeader).toContain('Job 1042  -Ash')
     expect(headerFooter.oddHeader).toContain('2026-05-14')
     expect(headerFooter.oddFooter).toContain('Page &P of &N')
     expect(headerFooter.oddFooter).toMatch(/licensed engineer/)
