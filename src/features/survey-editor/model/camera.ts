@@ -53,7 +53,8 @@ export function zoomAround(
   return { zoom, left: at.screenX - x * zoom, top: at.screenY - y * zoom }
 }
 
-export const leastZoom = (picture: Viewport, viewport: Viewport): number => fit(picture, viewport).zoom * LEAST_OF_FIT
+export const leastZoom = (picture: Viewport, viewport: Viewport): number =>
+  fit(picture, viewport).zoom * LEAST_OF_FIT
 
 export const panBy = (camera: Camera, dx: number, dy: number): Camera => ({
   ...camera,
@@ -64,7 +65,8 @@ export const panBy = (camera: Camera, dx: number, dy: number): Camera => ({
 /** Keeps at least a corner's worth of the picture in view, so that it cannot be lost. */
 export function keepInView(camera: Camera, picture: Viewport, viewport: Viewport): Camera {
   const margin = Math.min(80, viewport.width / 4, viewport.height / 4)
-  const clamp = (value: number, size: number, room: number) => Math.min(room - margin, Math.max(margin - size, value))
+  const clamp = (value: number, size: number, room: number) =>
+    Math.min(room - margin, Math.max(margin - size, value))
   return {
     ...camera,
     left: clamp(camera.left, picture.width * camera.zoom, viewport.width),

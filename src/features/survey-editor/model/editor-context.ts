@@ -6,8 +6,7 @@ import type { SurveyOperation } from '@shared/survey/survey-operation'
 
 /** What is in hand. A `rectangle` is the one of known size on the photo with this id. */
 export type Selection =
-  | { kind: 'none' }
-  | { kind: 'post' | 'bay' | 'run' | 'photo' | 'rectangle'; id: string }
+  { kind: 'none' } | { kind: 'post' | 'bay' | 'run' | 'photo' | 'rectangle'; id: string }
 
 /** What panels and the table show. */
 export interface EditorView {

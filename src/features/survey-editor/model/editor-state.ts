@@ -28,6 +28,7 @@ export interface EditorState {
   placing: string | null
   /** What the current tool waits for, in a few words, for the screen and for screen readers. */
   hint: string
+  canEdit: boolean
   canUndo: boolean
   canRedo: boolean
 }
@@ -45,6 +46,7 @@ export const keeping: Record<keyof EditorState, 'server' | 'tab' | 'nowhere'> = 
   cursor: 'nowhere',
   placing: 'nowhere',
   hint: 'nowhere',
+  canEdit: 'nowhere',
   canUndo: 'tab',
   canRedo: 'tab',
 }

@@ -18,7 +18,8 @@ export function strokesOf(survey: Survey, photo: Photo | undefined): Map<string,
   if (!photo) return strokes
   for (const { id } of survey.posts) {
     const mark = photo.posts[id]
-    if (mark) strokes.set(id, { base: mark.base, top: mark.top ?? guessTop(mark.base, Object.values(photo.posts)) })
+    if (mark)
+      strokes.set(id, { base: mark.base, top: mark.top ?? guessTop(mark.base, Object.values(photo.posts)) })
   }
   return strokes
 }
@@ -49,7 +50,10 @@ export function guessTop(base: PhotoPoint, known: readonly PostMark[]): PhotoPoi
 const middle = ({ base, top }: Stroke): PhotoPoint => [(base[0] + top[0]) / 2, (base[1] + top[1]) / 2]
 
 /** A bay's line, at mid-height from post to post; none where either post is not marked on this photo. */
-export function bayLine(bay: Bay, strokes: ReadonlyMap<string, Stroke>): readonly [PhotoPoint, PhotoPoint] | undefined {
+export function bayLine(
+  bay: Bay,
+  strokes: ReadonlyMap<string, Stroke>,
+): readonly [PhotoPoint, PhotoPoint] | undefined {
   const from = strokes.get(bay.from)
   const to = strokes.get(bay.to)
   return from && to ? [middle(from), middle(to)] : undefined

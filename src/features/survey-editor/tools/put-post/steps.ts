@@ -1,0 +1,7 @@
+import type { Target } from '../../model/hit-test'
+import type { ToolPointer } from '../../model/inputs'
+
+export type PutPostStep =
+  | { to: 'idle' }
+  | { to: 'pointing'; start: ToolPointer; target: Target | undefined }
+  | { to: 'dragging'; start: ToolPointer }
