@@ -136,7 +136,7 @@ describe('the next gap', () => {
   })
 })
 
-describe('gaps and the calculation', () => {
+describe('gaps and the calculation', { timeout: 60_000 }, () => {
   const needed = {
     'missing-reading': 'reading',
     'missing-angle': 'angle',
