@@ -30,6 +30,8 @@ export function readProcessNote(folder) {
 
 /** A process that is there and more than a remnant nobody has collected. */
 export function isAlive(pid) {
+  // 0 would ask after our own group, -1 after everybody.
+  if (!(pid > 0)) return false
   try {
     process.kill(pid, 0)
   } catch (error) {

@@ -1,10 +1,11 @@
 import { randomBytes } from 'node:crypto'
-import { mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs'
+import { existsSync, mkdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { isAlive } from './cluster-process.mjs'
 import { diskFull, freeBytes, Trouble } from './trouble.mjs'
 
-const ROOM_BYTES = 100 * 2 ** 20
+/** Room for a new database, and for one that is there to go on. */
+const ROOM_BYTES = { making: 100 * 2 ** 20, keeping: 24 * 2 ** 20 }
 
 /** Makes the data folder if need be and checks that it can be used. @throws Trouble */
 export function openDataFolder(folder) {
@@ -21,7 +22,8 @@ export function openDataFolder(folder) {
       `The data folder ${folder} cannot be used (${error.code}): make it a folder this user may write, or name another with TAUTBOOK_DATA.`,
     )
   }
-  if (freeBytes(folder) < ROOM_BYTES) throw diskFull(folder)
+  const room = existsSync(join(folder, 'database.json')) ? ROOM_BYTES.keeping : ROOM_BYTES.making
+  if (freeBytes(folder) < room) throw diskFull(folder)
 }
 
 /** Writes a small file whole or not at all, for its owner's eyes. */

@@ -2,6 +2,10 @@ interface KeptCluster {
   /** The address of its one database. */
   url: string
   stop: () => Promise<void>
+  /** Whether its server has ended, as when it was killed. */
+  isGone: () => boolean
+  /** Starts it again on the same port. @throws Trouble */
+  startAgain: () => Promise<number>
 }
 
 /** Finds or makes the cluster of a data folder and starts it. @throws Trouble */

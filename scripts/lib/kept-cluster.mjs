@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto'
 import { existsSync, mkdirSync, renameSync, rmSync } from 'node:fs'
 import { basename, dirname, join } from 'node:path'
 import { blockingFolder, clusterAccount, letPass } from './cluster-account.mjs'
+import { isAlive, readProcessNote } from './cluster-process.mjs'
 import { DATABASE, makeCluster, newPassword, query, startCluster, stopCluster, urlOf } from './cluster.mjs'
 import { readIfThere, writePrivately } from './data-folder.mjs'
 import { namesIn } from './find-program.mjs'
@@ -131,7 +132,12 @@ export async function openKeptCluster({ dataFolder, dataChosen, say }) {
     await stopCluster(cluster)
     throw error
   }
-  return { url: urlOf({ port, password: note.password }), stop: () => stopCluster(cluster) }
+  return {
+    url: urlOf({ port, password: note.password }),
+    stop: () => stopCluster(cluster),
+    isGone: () => !isAlive(readProcessNote(folder)?.pid ?? 0),
+    startAgain: () => startCluster({ ...cluster, port }),
+  }
 }
 
 function checkReach({ account, folder }) {

@@ -68,6 +68,14 @@ describe('openKeptCluster', () => {
     expect(note(0)).not.toBe(before)
   })
 
+  it('notices that its server was killed and starts it again at the same address', async () => {
+    expect(cluster.isGone()).toBe(false)
+    process.kill(Number(note(0)), 'SIGKILL')
+    await expect.poll(() => cluster.isGone()).toBe(true)
+    expect(String(await cluster.startAgain())).toBe(new URL(cluster.url).port)
+    expect(cluster.isGone()).toBe(false)
+  })
+
   it('is not misled by a note that names a stranger’s process', async () => {
     await cluster.stop()
     writeFileSync(path.join(folder, 'postmaster.pid'), `${process.pid}\n${folder}\n1\n1\n\n127.0.0.1\n`)
