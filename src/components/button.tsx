@@ -1,0 +1,80 @@
+import type { ButtonHTMLAttributes, ReactNode } from 'react'
+import { Link, type LinkProps } from 'react-router-dom'
+import { classes } from './classes'
+
+export type ButtonLook = 'primary' | 'secondary' | 'quiet' | 'danger'
+
+const looks: Record<ButtonLook, string> = {
+  primary: 'bg-spruce text-on-spruce border-spruce hover:opacity-90',
+  secondary: 'bg-card text-ink border-rule hover:border-ink',
+  quiet: 'bg-transparent text-spruce border-transparent hover:bg-card',
+  danger: 'bg-card text-stop border-stop hover:bg-stop-ground',
+}
+
+export const buttonClasses = (look: ButtonLook, className?: string): string =>
+  classes(
+    'inline-flex min-h-12 items-center justify-center gap-2 rounded border px-4 py-2 text-base font-medium',
+    'disabled:cursor-not-allowed disabled:opacity-50 aria-disabled:opacity-50',
+    looks[look],
+    className,
+  )
+
+interface ButtonProps extends ButtonHTMLAttributes<HTMLButtonElement> {
+  look?: ButtonLook
+  /** Work is under way: the button says so and cannot be pressed again. */
+  busy?: boolean
+}
+
+export function Button({
+  look = 'secondary',
+  busy = false,
+  className,
+  children,
+  disabled,
+  ...rest
+}: ButtonProps) {
+  return (
+    <button
+      type="button"
+      className={buttonClasses(look, className)}
+      disabled={disabled === true || busy}
+      aria-busy={busy}
+      {...rest}
+    >
+      {children}
+      {busy && <span aria-hidden="true">…</span>}
+    </button>
+  )
+}
+
+/** A link that looks like a button, for going somewhere. */
+export function ButtonLink({ look = 'secondary', className, ...rest }: LinkProps & { look?: ButtonLook }) {
+  return <Link className={buttonClasses(look, className)} {...rest} />
+}
+
+interface IconButtonProps extends ButtonHTMLAttributes<HTMLButtonElement> {
+  /** What it does, for everybody who cannot see the icon. */
+  label: string
+  children: ReactNode
+  pressed?: boolean
+}
+
+export function IconButton({ label, children, pressed, className, ...rest }: IconButtonProps) {
+  return (
+    <button
+      type="button"
+      aria-label={label}
+      aria-pressed={pressed}
+      title={label}
+      className={classes(
+        'inline-flex size-12 shrink-0 items-center justify-center rounded border border-transparent text-ink',
+        'hover:border-rule disabled:cursor-not-allowed disabled:opacity-40',
+        pressed === true && 'bg-chalk-ground text-chalk',
+        className,
+      )}
+      {...rest}
+    >
+      {children}
+    </button>
+  )
+}

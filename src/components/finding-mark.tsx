@@ -1,0 +1,47 @@
+import type { ReactNode } from 'react'
+import type { Finding, FindingLevel } from '@shared/schemas/finding'
+import { classes } from './classes'
+
+const colours: Record<FindingLevel, string> = { note: 'text-steel', check: 'text-marker', stop: 'text-stop' }
+const grounds: Record<FindingLevel, string> = {
+  note: 'border-rule bg-card',
+  check: 'border-marker bg-marker-ground',
+  stop: 'border-stop bg-stop-ground',
+}
+
+/** A finding's shape: circle for a note, triangle for a check, octagon for a stop; never colour alone. */
+export function FindingMark({ level, className }: { level: FindingLevel; className?: string }) {
+  return (
+    <svg
+      role="img"
+      aria-label={level}
+      viewBox="0 0 20 20"
+      className={classes('size-5 shrink-0', colours[level], className)}
+      fill="none"
+      stroke="currentColor"
+      strokeWidth="2"
+    >
+      {level === 'note' && <circle cx="10" cy="10" r="7.5" />}
+      {level === 'check' && <path d="M10 2.5 18.5 17.5H1.5Z" strokeLinejoin="round" />}
+      {level === 'stop' && <path d="M6.5 2h7L18 6.5v7L13.5 18h-7L2 13.5v-7Z" strokeLinejoin="round" />}
+      <path d={level === 'check' ? 'M10 8v4.5M10 14.5v1' : 'M10 6v5.5M10 13.5v1'} />
+    </svg>
+  )
+}
+
+/** A finding as a line of a list, with a way to where it is. */
+export function FindingItem({
+  finding,
+  action,
+}: {
+  finding: Pick<Finding, 'level' | 'text'>
+  action?: ReactNode
+}) {
+  return (
+    <div className={classes('flex items-start gap-3 rounded border p-3', grounds[finding.level])}>
+      <FindingMark level={finding.level} className="mt-0.5" />
+      <p className="min-w-0 flex-1 text-base">{finding.text}</p>
+      {action}
+    </div>
+  )
+}

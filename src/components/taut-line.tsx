@@ -1,0 +1,48 @@
+import { classes } from './classes'
+
+interface TautLineProps {
+  /** 0 is slack (dashed all along), 1 is taut; in between the taut part grows from the left. */
+  share?: number
+  /** Moves, for work whose length is not known. */
+  busy?: boolean
+  className?: string
+}
+
+/** The one line of the house: a straight 2 px line held by two short end ticks. Decoration; words beside it carry the meaning. */
+export function TautLine({ share = 1, busy = false, className }: TautLineProps) {
+  const taut = `${Math.min(1, Math.max(0, share)) * 100}%`
+  return (
+    <svg
+      aria-hidden="true"
+      className={classes('block h-3 w-full text-spruce', className)}
+      preserveAspectRatio="none"
+    >
+      <g stroke="currentColor" strokeWidth="2">
+        <line x1="1" y1="1" x2="1" y2="11" />
+        <line x1="100%" y1="1" x2="100%" y2="11" transform="translate(-1 0)" />
+        <line
+          x1="0"
+          y1="6"
+          x2="100%"
+          y2="6"
+          strokeDasharray="6 6"
+          opacity={busy ? 1 : 0.45}
+          style={busy ? { animation: 'tighten 0.8s linear infinite' } : undefined}
+        />
+        {!busy && <line x1="0" y1="6" x2={taut} y2="6" />}
+      </g>
+    </svg>
+  )
+}
+
+/** Tautbook's mark and name. */
+export function Brand({ className }: { className?: string }) {
+  return (
+    <span className={classes('inline-flex items-center gap-2 font-semibold', className)}>
+      <svg aria-hidden="true" width="28" height="16" className="text-spruce">
+        <path d="M2 8h24M2 2v12M26 2v12" stroke="currentColor" strokeWidth="2" fill="none" />
+      </svg>
+      Tautbook
+    </span>
+  )
+}
