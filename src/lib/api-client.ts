@@ -76,6 +76,12 @@ async function reach(url: string, { method, body, signal }: Request): Promise<Re
   }
 }
 
+/** The header that a request outside `call` must carry to change something. */
+export async function csrfHeader(): Promise<[name: string, value: string]> {
+  if (token === undefined) await fetchToken()
+  return ['x-csrf-token', token ?? '']
+}
+
 async function fetchToken(): Promise<void> {
   const answer = await reach('/api/session', { method: 'GET' })
   const { csrfToken } = (await answer.json()) as { csrfToken: string }
