@@ -12,7 +12,9 @@ export const makeReadingSchema = (q: Quantities) =>
     at: z.enum(['top', 'bottom']).default('top'),
     value: q.positive,
     by: z.string().max(120).optional(),
-    on: z.iso.datetime({ offset: true }).optional(),
+    on: z.iso
+      .datetime({ offset: true, error: 'expected a date and time such as 2026-05-04T10:12:00Z' })
+      .optional(),
     struck: strikeReasonSchema.optional(),
   })
 

@@ -44,15 +44,20 @@ interface FileUnits {
 
 function fileQuantities({ length, force }: FileUnits): Quantities {
   const longest = length.write(LONGEST)
-  const lengthCodec = (written: z.ZodNumber, description: string) =>
-    z.codec(written.meta({ description }), branded<Length>(z.int()), {
+  const lengthCodec = (written: z.ZodNumber, description: string, stored: z.ZodNumber = z.int()) =>
+    z.codec(written.meta({ description }), branded<Length>(stored), {
       decode: (value) => length.read(value),
       encode: (value) => length.write(value as Length),
     })
   return {
     length: lengthCodec(z.number().min(-longest).max(longest), `length in ${length.name}`),
     size: lengthCodec(z.number().min(0).max(longest), `length in ${length.name}, zero or more`),
-    positive: lengthCodec(z.number().positive().max(longest), `length in ${length.name}, above zero`),
+    // What rounds to no whole nanometre would be stored as nothing.
+    positive: lengthCodec(
+      z.number().positive().max(longest),
+      `length in ${length.name}, above zero`,
+      z.int().min(1, 'expected a length above zero'),
+    ),
     force: z.codec(
       z
         .number()
@@ -78,7 +83,12 @@ const lengthUnits = {
   mm: { name: 'millimetres', read: millimetres, write: (length: Length) => toMillimetres(length) },
 }
 const forceUnits = {
-  lbf: { name: 'pounds-force', read: poundsForce, write: (force: Force) => toPoundsForce(force) },
+  // To 15 digits: 1 lbf is no whole number of newtons, and 150 lbf read and written must be 150 again.
+  lbf: {
+    name: 'pounds-force',
+    read: poundsForce,
+    write: (force: Force) => Number(toPoundsForce(force).toPrecision(15)),
+  },
   N: { name: 'newtons', read: newtons, write: (force: Force) => force as number },
 }
 

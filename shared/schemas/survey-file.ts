@@ -69,7 +69,7 @@ export function describeIssue(issue: z.core.$ZodIssue, input: unknown): string {
       .map((key) => `${formatPath([...issue.path, key])}: unknown key; remove it or correct its name`)
       .join('\n')
   }
-  return `${path}: found ${showValue(valueAt(input, issue.path))}, ${issue.message.replace(/^Invalid [a-z]+: /, '')}`
+  return `${path}: found ${showValue(valueAt(input, issue.path))}, ${issue.message.replace(/^(Invalid [a-z]+|Too small|Too big): /, '')}`
 }
 
 const formatPath = (path: PropertyKey[]): string =>

@@ -139,32 +139,36 @@ describe('what is not understood', () => {
     expect(refusal('x'.repeat(5000)).message.length).toBeLessThan(120)
   })
 
-  it('never throws and gives whole nanometres of zero or more, whatever is written', { timeout: 60_000 }, () => {
-    const pieces = fc.constantFrom(
-      ...`0123456789.,'"/-⁄⅜ ′″`,
-      ' ft',
-      ' in',
-      ' mm',
-      ' m',
-      '3/8',
-      '-',
-      'x',
-      '\n',
-      '😀',
-    )
-    const text = fc.oneof(
-      fc.string({ unit: 'binary', maxLength: 20 }),
-      fc.array(pieces, { maxLength: 12 }).map((p) => p.join('')),
-    )
-    fc.assert(
-      fc.property(text, fc.constantFrom('in' as const, 'mm' as const), (written, house) => {
-        const parsed = read(written, house)
-        if (parsed.ok) return Number.isSafeInteger(parsed.length) && parsed.length >= 0
-        return parsed.message.endsWith('.') && written.includes(parsed.part.trim().slice(0, 1))
-      }),
-      { numRuns: 2000 },
-    )
-  })
+  it(
+    'never throws and gives whole nanometres of zero or more, whatever is written',
+    { timeout: 60_000 },
+    () => {
+      const pieces = fc.constantFrom(
+        ...`0123456789.,'"/-⁄⅜ ′″`,
+        ' ft',
+        ' in',
+        ' mm',
+        ' m',
+        '3/8',
+        '-',
+        'x',
+        '\n',
+        '😀',
+      )
+      const text = fc.oneof(
+        fc.string({ unit: 'binary', maxLength: 20 }),
+        fc.array(pieces, { maxLength: 12 }).map((p) => p.join('')),
+      )
+      fc.assert(
+        fc.property(text, fc.constantFrom('in' as const, 'mm' as const), (written, house) => {
+          const parsed = read(written, house)
+          if (parsed.ok) return Number.isSafeInteger(parsed.length) && parsed.length >= 0
+          return parsed.message.endsWith('.') && written.includes(parsed.part.trim().slice(0, 1))
+        }),
+        { numRuns: 2000 },
+      )
+    },
+  )
 })
 
 /** The first text of these that is not read back as what was written, by steps of `step` nm. */
