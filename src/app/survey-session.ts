@@ -1,0 +1,160 @@
+import { useQuery } from '@tanstack/react-query'
+import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
+import type { Hardware } from '@shared/schemas/hardware'
+import type { HouseRules } from '@shared/schemas/house-rules'
+import type { Survey } from '@shared/schemas/survey'
+import type { PhotoRecord, SurveyRecord } from '@shared/schemas/survey-record'
+import { proposeRuns } from '@shared/survey/propose-runs'
+import { longestRun } from '@shared/survey/longest-run'
+import { sayProblem } from '@/components/toast'
+import { hardwareQuery } from '@/features/hardware/api/read-hardware'
+import { houseRulesQuery } from '@/features/hardware/api/read-house-rules'
+import { usableHardware } from '@/features/hardware/usable-hardware'
+import { useMay, useSession } from '@/features/session/session'
+import { Editor } from '@/features/survey-editor/model/editor'
+import type { Viewport } from '@/features/survey-editor/model/camera'
+import type { EditorActions, EditorView } from '@/features/survey-editor/model/editor-context'
+import { changeSurvey } from '@/features/surveys/api/change-survey'
+import { readHistory } from '@/features/surveys/api/read-history'
+import { readSurvey, surveyQuery } from '@/features/surveys/api/read-survey'
+import { ChangeQueue } from '@/features/surveys/change-queue'
+import type { QueueState } from '@/features/surveys/change-queue-step'
+
+/** One survey in hand: what its screens show and do, and how far it is saved. */
+export interface SurveySession {
+  record: SurveyRecord
+  editor: Editor
+  queue: ChangeQueue
+  queueState: QueueState
+  view: EditorView
+  actions: EditorActions
+  /** Photos of the survey, those added since it was opened too. */
+  photos: readonly PhotoRecord[]
+  addPhotoRecord: (photo: PhotoRecord) => void
+}
+
+interface Loaded {
+  record: SurveyRecord
+  hardware: Hardware
+  rules: HouseRules
+}
+
+/** What a survey's screens need before they can begin. */
+export function useSurveyData(surveyId: string) {
+  const record = useQuery(surveyQuery(surveyId))
+  const catalogue = useQuery(hardwareQuery)
+  const rules = useQuery(houseRulesQuery)
+  const error = record.error ?? catalogue.error ?? rules.error
+  const survey = record.data?.survey
+  const hardware = useMemo(
+    () => (catalogue.data && survey ? usableHardware(catalogue.data, survey) : undefined),
+    [catalogue.data, survey],
+  )
+  const retry = () => {
+    for (const query of [record, catalogue, rules]) if (query.error) void query.refetch()
+  }
+  const data: Loaded | undefined =
+    record.data && hardware && rules.data ? { record: record.data, hardware, rules: rules.data } : undefined
+  return { data, error: data ? null : error, retry }
+}
+
+/** Opens a survey for editing; what is loaded afterwards does not disturb the copy in hand. */
+export function useSurveySession(loaded: Loaded): SurveySession {
+  const { person, company } = useSession()
+  const canEdit = useMay('survey:edit')
+  const [photos, setPhotos] = useState<readonly PhotoRecord[]>(loaded.record.photos)
+  const [{ editor, queue }] = useState(() => open(loaded, canEdit))
+  const state = useSyncExternalStore(editor.subscribe, editor.getSnapshot)
+  const queueState = useSyncExternalStore(queue.subscribe, queue.getSnapshot)
+  useSendOnReturn(queue)
+  useWarnBeforeLeaving(queueState.pending.length > 0)
+  const { survey, selection } = state
+  const view = useMemo<EditorView>(
+    () => ({
+      survey,
+      selection,
+      hardware: loaded.hardware,
+      rules: loaded.rules,
+      units: survey.units,
+      fraction: company.fraction,
+      person: { name: person.name },
+      canEdit,
+    }),
+    [survey, selection, loaded, company.fraction, person.name, canEdit],
+  )
+  const addPhotoRecord = (photo: PhotoRecord) => {
+    setPhotos((known) => {
+      const all = [...known, photo]
+      editor.receive(editor.getSnapshot().survey, pictureSizes(all))
+      return all
+    })
+  }
+  return { record: loaded.record, editor, queue, queueState, view, actions: editor, photos, addPhotoRecord }
+}
+
+function open({ record, hardware, rules }: Loaded, canEdit: boolean) {
+  const cable = hardware.cables[0]?.id
+  const queue: ChangeQueue = new ChangeQueue(record, {
+    send: (body) => changeSurvey(record.id, body),
+    reread: (since) => reread(record.id, since),
+    newId: () => crypto.randomUUID(),
+    onRebased: (survey) => editor.receive(survey),
+    onTrouble: sayProblem,
+  })
+  const editor = new Editor({
+    survey: record.survey,
+    pictures: pictureSizes(record.photos),
+    canEdit,
+    onOperation: queue.perform,
+    onRefusal: sayProblem,
+    runsFor: (survey: Survey) =>
+      cable === undefined
+        ? []
+        : proposeRuns(survey, {
+            cable,
+            maxBend: rules.maxBend,
+            longestRun: longestRun(hardware, rules, survey.runs[0]?.cable ?? cable),
+          }),
+  })
+  return { editor, queue }
+}
+
+const pictureSizes = (photos: readonly PhotoRecord[]): ReadonlyMap<string, Viewport> =>
+  new Map(photos.map(({ surveyPhotoId, width, height }) => [surveyPhotoId, { width, height }]))
+
+/** The survey now, and the changes the server has seen since a revision. */
+async function reread(surveyId: string, since: number) {
+  const seen = new Set<string>()
+  let before: number | null = null
+  do {
+    const page: Awaited<ReturnType<typeof readHistory>> = await readHistory(
+      surveyId,
+      before === null ? { limit: 200 } : { before, limit: 200 },
+    )
+    const fresh = page.entries.filter(({ revision }) => revision > since)
+    for (const { changeId } of fresh) seen.add(changeId)
+    before = fresh.length === page.entries.length ? page.next : null
+  } while (before !== null)
+  const { revision, survey } = await readSurvey(surveyId)
+  return { revision, survey, seen }
+}
+
+function useSendOnReturn(queue: ChangeQueue): void {
+  useEffect(() => {
+    window.addEventListener('online', queue.flush)
+    return () => {
+      window.removeEventListener('online', queue.flush)
+      queue.flush()
+    }
+  }, [queue])
+}
+
+/** The browser asks before it drops what has not been sent. */
+function useWarnBeforeLeaving(unsent: boolean): void {
+  useEffect(() => {
+    if (!unsent) return
+    const warn = (event: BeforeUnloadEvent) => event.preventDefault()
+    window.addEventListener('beforeunload', warn)
+    return () => window.removeEventListener('beforeunload', warn)
+  }, [unsent])
+}
