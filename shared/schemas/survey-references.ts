@@ -7,6 +7,7 @@ interface Names {
   photos: { id: string; posts: Record<string, unknown> }[]
 }
 
+type Ends = { from: string; to: string }
 type Path = (string | number)[]
 /** Takes a fault: where, what was found there, what was expected. */
 export type Report = (path: Path, value: unknown, message: string) => void
@@ -25,8 +26,9 @@ export function checkSurveyReferences(survey: Names, report: Report): void {
     if (bay.from === bay.to) report(['bays', i, 'to'], bay.to, 'expected another post than the bay begins at')
     checkUnique(bay.readings, ['bays', i, 'readings'], report)
   })
+  const bays = new Map(survey.bays.map((bay) => [bay.id, bay]))
   survey.runs.forEach((run, i) => {
-    checkChain(survey, run.bays, ['runs', i, 'bays'], report)
+    checkChain(bays, run.bays, ['runs', i, 'bays'], report)
     checkUnique(run.readings, ['runs', i, 'readings'], report)
   })
   survey.diagonals.forEach((diagonal, i) => {
@@ -52,9 +54,8 @@ function checkUnique(items: { id: string }[], path: Path, report: Report): void 
 }
 
 /** Each bay of a run begins where the one before it ended, in whichever direction the bay was written. */
-function checkChain(survey: Names, ids: string[], path: Path, report: Report): void {
-  const bays = new Map(survey.bays.map((bay) => [bay.id, bay]))
-  const ends: { from: string; to: string }[] = []
+function checkChain(bays: ReadonlyMap<string, Ends>, ids: string[], path: Path, report: Report): void {
+  const ends: Ends[] = []
   for (const [j, id] of ids.entries()) {
     const bay = bays.get(id)
     if (!bay) return report([...path, j], id, 'expected the id of a bay of this survey')
@@ -79,5 +80,5 @@ function checkChain(survey: Names, ids: string[], path: Path, report: Report): v
 }
 
 /** Two bays side by side, between the same two posts. */
-const bothMeet = (a: { from: string; to: string }, b: { from: string; to: string }): boolean =>
+const bothMeet = (a: Ends, b: Ends): boolean =>
   (a.from === b.from && a.to === b.to) || (a.from === b.to && a.to === b.from)

@@ -2,7 +2,7 @@ import type { Bay } from '../schemas/bay'
 import type { Post } from '../schemas/post'
 import type { Run } from '../schemas/run'
 import type { Corner, Survey } from '../schemas/survey'
-import { baysNamed, firstBays, postsOfBays, sideOfPost } from './run-posts'
+import { baysNamed, byId, firstBays, postsOfBays, sideOfPost } from './run-posts'
 import { baysByPost, type Stop, walk } from './walk'
 
 export type GapCode =
@@ -97,22 +97,23 @@ function resolve(survey: Survey): Known {
   for (const run of survey.runs) {
     for (const id of run.bays) runsOfBay.set(id, [...(runsOfBay.get(id) ?? []), run])
   }
+  const bays = byId(survey.bays)
   return {
-    posts: new Map(survey.posts.map((post) => [post.id, post])),
-    bays: new Map(survey.bays.map((bay) => [bay.id, bay])),
+    posts: byId(survey.posts),
+    bays,
     meeting: baysByPost(survey),
     runsOfBay,
-    needs: postNeeds(survey),
+    needs: postNeeds(survey, bays),
   }
 }
 
-function postNeeds(survey: Survey): ReadonlyMap<string, PostNeeds> {
+function postNeeds(survey: Survey, bays: ReadonlyMap<string, Bay>): ReadonlyMap<string, PostNeeds> {
   const needs = new Map<string, PostNeeds>()
   const first = firstBays(survey.bays)
   const corners = new Map<string, Corner>(survey.corners.map((corner) => [corner.post, corner]))
   const walls = new Set(survey.posts.flatMap(({ id, material }) => (material === 'masonry' ? [id] : [])))
   for (const run of survey.runs) {
-    const posts = postsOfBays(baysNamed(survey, run.bays))
+    const posts = postsOfBays(baysNamed(bays, run.bays))
     posts.forEach((post, i) => {
       const isEnd = i === 0 || i === posts.length - 1
       if (!isEnd && hasReading(run)) return

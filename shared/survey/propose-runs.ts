@@ -31,7 +31,7 @@ export function proposeRuns(survey: Survey, rules: ProposalRules): SimpleOperati
   const rows = resolveRows(survey, rules)
   const taken = new Set(survey.runs.map(({ id }) => id))
   const divisions = survey.runs.flatMap((run) => {
-    const parts = runParts(rows, baysNamed(survey, run.bays), run.readings)
+    const parts = runParts(rows, baysNamed(rows.bays, run.bays), run.readings)
     return parts.length > 1 ? divideRun(survey, { run, parts: parts.map(idsOf) }, taken) : []
   })
   const runs = applySteps(survey, divisions).runs.map((run) => ({ run, bays: run.bays }))
@@ -132,7 +132,7 @@ interface Joint {
 
 /** The bays of a run with a row joined to its end or its beginning; undefined where they do not meet. */
 function joined(rows: Rows, { growing, post, ordered, before }: Joint): Bay[] | undefined {
-  const bays = growing.bays.flatMap((id) => rows.bays.get(id) ?? [])
+  const bays = baysNamed(rows.bays, growing.bays)
   const posts = postsOfBays(bays)
   if (bays.at(-1) === before && posts.at(-1) === post) return [...bays, ...ordered]
   if (bays[0] === before && posts[0] === post) return [...ordered.toReversed(), ...bays]

@@ -3,7 +3,7 @@ import type { Post } from '../schemas/post'
 import type { Run } from '../schemas/run'
 import type { Corner, Survey } from '../schemas/survey'
 import { toDegrees, toRadians } from '../units/angle'
-import { otherPost, postsOfBays } from './run-posts'
+import { byId, otherPost, postsOfBays } from './run-posts'
 import { splitEvenly } from './split-evenly'
 import { cornerIsStraight } from './straight'
 import { baysByPost } from './walk'
@@ -26,8 +26,8 @@ export interface Rows extends RowRules {
 
 export const resolveRows = (survey: Survey, rules: RowRules): Rows => ({
   ...rules,
-  bays: new Map(survey.bays.map((bay) => [bay.id, bay])),
-  posts: new Map(survey.posts.map((post) => [post.id, post])),
+  bays: byId(survey.bays),
+  posts: byId(survey.posts),
   corners: new Map(survey.corners.map((corner) => [corner.post, corner])),
   meeting: baysByPost(survey),
 })

@@ -1,5 +1,5 @@
 import type { Bay } from '../schemas/bay'
-import type { Corner, Survey } from '../schemas/survey'
+import type { Corner } from '../schemas/survey'
 import { toRadians } from '../units/angle'
 
 /** The other end of a bay. */
@@ -19,11 +19,13 @@ export function postsOfBays(bays: readonly Pick<Bay, 'from' | 'to'>[]): string[]
   return posts
 }
 
+/** Things by their ids. */
+export const byId = <Item extends { id: string }>(items: readonly Item[]): ReadonlyMap<string, Item> =>
+  new Map(items.map((item) => [item.id, item]))
+
 /** The bays these ids name, in that order. */
-export function baysNamed({ bays }: Pick<Survey, 'bays'>, ids: readonly string[]): Bay[] {
-  const known = new Map(bays.map((bay) => [bay.id, bay]))
-  return ids.flatMap((id) => known.get(id) ?? [])
-}
+export const baysNamed = (bays: ReadonlyMap<string, Bay>, ids: readonly string[]): Bay[] =>
+  ids.flatMap((id) => bays.get(id) ?? [])
 
 /** The first bay, in the survey's order, that names each post: its size `along` is parallel to it. */
 export function firstBays(bays: readonly Bay[]): ReadonlyMap<string, string> {

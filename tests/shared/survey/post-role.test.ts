@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest'
-import { postRole, runsAtPost } from '@shared/survey/post-role'
+import { postRole, runsAtPosts } from '@shared/survey/post-role'
 import { aPost, aRow, aRun } from '../../factories/survey'
 
 const survey = aRow([48, 48, 48], {
@@ -23,6 +23,6 @@ it('is an end where two runs end and the angle was measured as straight', () => 
 })
 
 it('names the runs that end and those that pass', () => {
-  expect(runsAtPost(survey, 'P3')).toEqual({ ends: ['R1', 'R2'], passes: [] })
-  expect(runsAtPost(survey, 'P2')).toEqual({ ends: [], passes: ['R1'] })
+  expect(runsAtPosts(survey).get('P3')).toEqual({ ends: ['R1', 'R2'], passes: [] })
+  expect(runsAtPosts(survey).get('P2')).toEqual({ ends: [], passes: ['R1'] })
 })

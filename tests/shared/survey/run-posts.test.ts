@@ -4,7 +4,7 @@ import { layOutRun } from '@shared/calculation/course'
 import { starterHardware } from '@shared/calculation/starter-hardware'
 import { starterRules } from '@shared/calculation/starter-rules'
 import { indexSurvey } from '@shared/calculation/survey-index'
-import { baysNamed, firstBays, postsOfBays, sideOfPost } from '@shared/survey/run-posts'
+import { baysNamed, byId, firstBays, postsOfBays, sideOfPost } from '@shared/survey/run-posts'
 import { anySurvey } from '../../support/survey-arbitrary'
 
 describe('the posts of a run', () => {
@@ -36,7 +36,7 @@ describe('the survey and the calculation', { timeout: 60_000 }, () => {
         const index = indexSurvey({ survey, hardware: starterHardware, rules: starterRules })
         const first = firstBays(survey.bays)
         for (const run of survey.runs) {
-          const posts = postsOfBays(baysNamed(survey, run.bays))
+          const posts = postsOfBays(baysNamed(byId(survey.bays), run.bays))
           const sides = posts.map((post) =>
             sideOfPost(
               { first: first.get(post), corner: survey.corners.find((corner) => corner.post === post) },
