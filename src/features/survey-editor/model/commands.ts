@@ -104,7 +104,7 @@ export const commands: readonly Command[] = [
   },
   {
     name: 'Tap with the tool at the cursor',
-    shortcuts: [{ key: 'Enter' }, { key: ' ' }],
+    shortcuts: [{ key: 'Enter' }],
     when: withPhoto,
     perform: (editor) => editor.tapAtCursor(),
   },
@@ -131,7 +131,7 @@ export const shortcutName = ({ key, mod = false, shift = false }: Shortcut): str
   [
     mod ? 'Ctrl' : '',
     shift ? 'Shift' : '',
-    key === ' ' ? 'Space' : key.length === 1 ? key.toUpperCase() : key,
+    key.length === 1 ? key.toUpperCase() : key,
   ]
     .filter((part) => part !== '')
     .join(' + ')
@@ -147,7 +147,7 @@ interface KeyPress {
 export function commandFor(press: KeyPress, known: readonly Command[] = commands): Command | undefined {
   const key = press.key.length === 1 ? press.key.toLowerCase() : press.key
   const mod = press.ctrlKey || press.metaKey
-  const isSign = key.length === 1 && !/[a-z ]/.test(key)
+  const isSign = key.length === 1 && !/[a-z]/.test(key)
   return known.find(({ shortcuts }) =>
     shortcuts.some(
       (shortcut) =>
