@@ -10,7 +10,7 @@ import type { Services } from './services'
 import { featureRoutes } from './features/routes'
 
 /** The whole server over its services: what every request passes, then the features, then the client's files. */
-export function createApp(services: Services): Express {
+export function createApp(services: Services, { requestsPerMinute } = { requestsPerMinute: 1200 }): Express {
   const { config, log } = services
   const app = express()
   app.disable('x-powered-by')
@@ -19,7 +19,13 @@ export function createApp(services: Services): Express {
   app.use(helmet(securityHeaders(config.secureCookies)))
 
   const api = Router()
-  api.use('/api', generalLimit(), express.json({ limit: '2mb' }), ...sessions(services), protectFromForgery)
+  api.use(
+    '/api',
+    generalLimit(requestsPerMinute),
+    express.json({ limit: '2mb' }),
+    ...sessions(services),
+    protectFromForgery,
+  )
   featureRoutes(api, services)
   api.use('/api', nothingHere)
   app.use(api)

@@ -27,7 +27,15 @@ export const presentPerson = (row: PersonRow): Person => ({
 })
 
 /** The person of a request. */
-export function toSignedIn(person: PersonRow, company: CompanyRow): SignedIn {
-  const { state: _state, ...shown } = presentPerson(person)
-  return { ...shown, companyId: person.companyId, company: presentCompany(company) }
-}
+export const toSignedIn = (
+  person: Pick<PersonRow, 'id' | 'companyId' | 'name' | 'email' | 'roles' | 'lastSignInAt'>,
+  company: CompanyRow,
+): SignedIn => ({
+  id: person.id,
+  companyId: person.companyId,
+  name: person.name,
+  email: person.email,
+  roles: person.roles as Role[],
+  lastSignIn: person.lastSignInAt?.toISOString() ?? null,
+  company: presentCompany(company),
+})

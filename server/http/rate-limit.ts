@@ -8,10 +8,10 @@ const tooMany = (wait: string): AppError =>
   new AppError(429, 'too-many-requests', `Too many tries from here. Wait ${wait} and try again.`)
 
 /** For everything: far above what a person does, low enough to stop a runaway script. */
-export const generalLimit = (): RequestHandler =>
+export const generalLimit = (requestsPerMinute: number): RequestHandler =>
   rateLimit({
     windowMs: MINUTE,
-    limit: 1200,
+    limit: requestsPerMinute,
     standardHeaders: 'draft-8',
     legacyHeaders: false,
     handler: (_request, _response, next) => next(tooMany('a minute')),

@@ -21,10 +21,12 @@ export function presentSession(request: Request, person: SignedIn): Session {
 
 /** Begins a new session, under a new id and with a new token, for a person who has just shown who they are. */
 export async function beginSession(request: Request, person: SignedIn): Promise<Session> {
-  // Passport gives the session a new id, so one planted before sign-in is worth nothing after it.
+  // A new id, so that one planted before sign-in is worth nothing after it.
   await new Promise<void>((resolve, reject) =>
-    request.logIn(person, (error: unknown) => (error ? reject(asError(error)) : resolve())),
+    request.session.regenerate((error: unknown) => (error ? reject(asError(error)) : resolve())),
   )
+  request.session.person = { id: person.id, companyId: person.companyId }
+  request.user = person
   return presentSession(request, person)
 }
 

@@ -1,11 +1,20 @@
-import { and, eq, isNull, lt, ne } from 'drizzle-orm'
+import { and, eq, gt, isNull, lt, ne, sql } from 'drizzle-orm'
 import type { Database } from '../database/client'
 import { companies, people, sessions } from '../database/tables/index'
 
-/** A session with the person and company it is for; a disabled person's session is none. */
-export async function selectSession(database: Database, idHash: string) {
-  const [row] = await database
-    .select({ session: sessions, person: people, company: companies })
+/**
+ * Finds a session that has not ended, with the person and company it is for; a disabled person's session is nobody's.
+ * Every request asks this, so it is put together once and PostgreSQL plans it once per connection.
+ */
+export function sessionFinder(database: Database) {
+  const { id, companyId, name, email, roles, lastSignInAt } = people
+  const query = database
+    .select({
+      data: sessions.data,
+      personId: sessions.personId,
+      person: { id, companyId, name, email, roles, lastSignInAt },
+      company: companies,
+    })
     .from(sessions)
     .leftJoin(
       people,
@@ -16,19 +25,30 @@ export async function selectSession(database: Database, idHash: string) {
       ),
     )
     .leftJoin(companies, eq(companies.id, people.companyId))
-    .where(eq(sessions.idHash, idHash))
-  return row
+    .where(
+      and(
+        eq(sessions.idHash, sql.placeholder('idHash')),
+        gt(sessions.expiresAt, sql`${sql.placeholder('now')}::timestamptz`),
+      ),
+    )
+    .prepare('session')
+  return async (idHash: string, now: Date) => (await query.execute({ idHash, now: now.toISOString() }))[0]
 }
 
-export async function upsertSession(
-  database: Database,
-  session: typeof sessions.$inferInsert,
-): Promise<void> {
+type SessionRow = typeof sessions.$inferInsert
+
+/** Keeps a new session. */
+export async function upsertSession(database: Database, session: SessionRow): Promise<void> {
   const { idHash: _idHash, ...changes } = session
   await database
     .insert(sessions)
     .values(session)
     .onConflictDoUpdate({ target: sessions.idHash, set: changes })
+}
+
+/** Keeps what a session has become; one that was ended meanwhile stays ended. */
+export async function updateSession(database: Database, { idHash, ...changes }: SessionRow): Promise<void> {
+  await database.update(sessions).set(changes).where(eq(sessions.idHash, idHash))
 }
 
 export async function deleteSession(database: Database, idHash: string): Promise<void> {
@@ -45,10 +65,6 @@ export async function deleteSessionsOf(
   await database
     .delete(sessions)
     .where(keepIdHash === undefined ? ofPerson : and(ofPerson, ne(sessions.idHash, keepIdHash)))
-}
-
-export async function extendSession(database: Database, idHash: string, expiresAt: Date): Promise<void> {
-  await database.update(sessions).set({ expiresAt }).where(eq(sessions.idHash, idHash))
 }
 
 export async function deleteExpiredSessions(database: Database, now: Date): Promise<void> {

@@ -2,7 +2,6 @@ import type { RequestHandler } from 'express'
 import session from 'express-session'
 import type { Config } from '../config'
 import type { Services } from '../services'
-import { serverPassport } from './passport'
 import { SESSION_DAYS, SessionStore } from './session-store'
 
 export const cookieName = ({ secureCookies }: Config): string =>
@@ -17,8 +16,6 @@ export function sessions({ config, database, clock }: Services): RequestHandler[
       store: new SessionStore(database, clock),
       resave: false,
       saveUninitialized: false,
-      // The browser’s copy lives on with use as ours does.
-      rolling: true,
       cookie: {
         httpOnly: true,
         sameSite: 'lax',
@@ -27,6 +24,20 @@ export function sessions({ config, database, clock }: Services): RequestHandler[
         maxAge: SESSION_DAYS * 24 * 3_600_000,
       },
     }),
-    serverPassport.session() as RequestHandler,
+    keepAlive(clock),
   ]
 }
+
+const HOUR = 3_600_000
+
+/**
+ * A session lives on with use, ours and the browser's cookie alike: it changes once an hour, is therefore written with
+ * a later end, and the cookie is sent again.
+ */
+const keepAlive =
+  (clock: () => Date): RequestHandler =>
+  (request, _response, next) => {
+    const hour = Math.floor(clock().getTime() / HOUR)
+    if (request.user && request.session.usedInHour !== hour) request.session.usedInHour = hour
+    next()
+  }

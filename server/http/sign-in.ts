@@ -1,7 +1,7 @@
 import type { Request, Response } from 'express'
+import passport from 'passport'
 import { Strategy } from 'passport-local'
 import { AppError, asError } from '../errors'
-import { serverPassport } from './passport'
 import type { SignedIn } from './signed-in'
 
 const wrong = () =>
@@ -24,7 +24,7 @@ export function signInWithPassword(
       else if (person) resolve(person)
       else reject(wrong())
     }
-    const authenticate = serverPassport.authenticate(strategy, { session: false }, answer) as (
+    const authenticate = passport.authenticate(strategy, { session: false }, answer) as (
       request: Request,
       response: Response,
       next: (error?: unknown) => void,

@@ -25,9 +25,11 @@ declare module 'express-session' {
   interface SessionData {
     /** The token that requests which change something must carry. */
     csrf: string
-    /** Set by the session store from its own query, never written. */
-    account?: SignedIn
-    /** When it ends, in milliseconds; set by the session store. */
-    expiresAt?: number
+    /** Whose it is; nobody's before sign-in. */
+    person?: { id: string; companyId: string }
+    /** Set by the session store on a session it has read, never written. */
+    readonly known?: boolean
+    /** The hour of its latest use, counted from 1970. */
+    usedInHour?: number
   }
 }

@@ -13,7 +13,7 @@ export type JobCursor = z.infer<typeof cursorSchema>
 export type JobSort = JobCursor['sort']
 
 const cursorOf: Record<JobSort, (row: JobRow) => JobCursor> = {
-  updated: ({ updatedAt, id }) => ({ sort: 'updated', at: updatedAt.toISOString(), id }),
+  updated: ({ updatedAt, id }) => ({ sort: 'updated', at: updatedAt, id }),
   due: ({ due, id }) => ({ sort: 'due', due: due ?? 'infinity', id }),
   number: ({ number }) => ({ sort: 'number', number }),
 }

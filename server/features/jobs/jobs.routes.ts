@@ -2,12 +2,12 @@ import type { Router } from 'express'
 import { jobs } from '@shared/endpoints/jobs'
 import { route } from '../../http/route'
 import type { Services } from '../../services'
-import { changeJob, createJob, listJobs, moveJob, readJob } from './jobs.service'
+import { changeJob, createJob, jobLister, moveJob, readJob } from './jobs.service'
 
 export function jobsRoutes(router: Router, services: Services): void {
   const at = { router, services }
   const { database, clock } = services
-  route(at, jobs.listJobs, ({ companyId, query }) => listJobs(database, { companyId, query }))
+  route(at, jobs.listJobs, jobLister(database))
   route(at, jobs.createJob, ({ companyId, body }) =>
     createJob(database, { companyId, fields: body, now: clock() }),
   )

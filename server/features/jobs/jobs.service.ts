@@ -10,9 +10,8 @@ import {
   isActivePerson,
   type JobChanges,
   type JobKey,
-  type JobRow,
+  jobPageFinder,
   selectJob,
-  selectJobPage,
   takeJobNumber,
   updateJob,
 } from './jobs.queries'
@@ -22,24 +21,25 @@ interface ListRequest {
   query: z.output<typeof jobListQuerySchema>
 }
 
-/** A page of the company's jobs, and where the next page begins. */
-export async function listJobs(
-  database: Database,
-  { companyId, query }: ListRequest,
-): Promise<{ jobs: Job[]; next: string | null }> {
-  const { search = '', after, limit, sort, ...filter } = query
-  const rows = await selectJobPage(database, {
-    ...filter,
-    companyId,
-    words: search.split(/\s+/).filter((word) => word !== ''),
-    sort,
-    after: after === undefined ? undefined : readCursor(sort, after),
-    // One more than shown tells whether there is a next page.
-    limit: limit + 1,
-  })
-  const shown = rows.slice(0, limit)
-  const last = shown.at(-1)
-  return { jobs: shown.map(toJob), next: last && rows.length > limit ? writeCursor(sort, last) : null }
+type JobLister = (request: ListRequest) => Promise<{ jobs: Job[]; next: string | null }>
+
+/** Answers with a page of the company's jobs, and where the next page begins. */
+export function jobLister(database: Database): JobLister {
+  const findPage = jobPageFinder(database)
+  return async ({ companyId, query: { search = '', after, limit, sort, ...filter } }) => {
+    const rows = await findPage({
+      ...filter,
+      companyId,
+      words: search.split(/\s+/).filter((word) => word !== ''),
+      sort,
+      after: after === undefined ? undefined : readCursor(sort, after),
+      // One more than shown tells whether there is a next page.
+      limit: limit + 1,
+    })
+    const jobs = rows.slice(0, limit)
+    const last = jobs.at(-1)
+    return { jobs, next: last && rows.length > limit ? writeCursor(sort, last) : null }
+  }
 }
 
 interface NewJob {
@@ -99,7 +99,7 @@ async function update(
 async function readRow(database: Database, key: JobKey): Promise<Job> {
   const row = await selectJob(database, key)
   if (!row) throw noSuchJob()
-  return toJob(row)
+  return row
 }
 
 async function assertPerson(
@@ -110,9 +110,3 @@ async function assertPerson(
   if (personId === null || personId === undefined) return
   if (!(await isActivePerson(database, { companyId, personId }))) throw notAPerson()
 }
-
-const toJob = ({ createdAt, updatedAt, ...row }: JobRow): Job => ({
-  ...row,
-  createdAt: createdAt.toISOString(),
-  updatedAt: updatedAt.toISOString(),
-})
