@@ -33,7 +33,7 @@ export interface SurveySession {
   addPhotoRecord: (photo: PhotoRecord) => void
 }
 
-interface Loaded {
+export interface Loaded {
   record: SurveyRecord
   hardware: Hardware
   rules: HouseRules

@@ -128,11 +128,7 @@ export const commands: readonly Command[] = [
 ]
 
 export const shortcutName = ({ key, mod = false, shift = false }: Shortcut): string =>
-  [
-    mod ? 'Ctrl' : '',
-    shift ? 'Shift' : '',
-    key.length === 1 ? key.toUpperCase() : key,
-  ]
+  [mod ? 'Ctrl' : '', shift ? 'Shift' : '', key.length === 1 ? key.toUpperCase() : key]
     .filter((part) => part !== '')
     .join(' + ')
 

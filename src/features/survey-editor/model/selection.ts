@@ -1,4 +1,5 @@
 import type { Survey } from '@shared/schemas/survey'
+import type { Gap } from '@shared/survey/find-gaps'
 import type { Selection } from './editor-context'
 
 /** The selection, or none when what was selected is gone. */
@@ -41,3 +42,7 @@ export function stepSelection(order: readonly Selection[], selection: Selection,
   const next = at < 0 ? (step > 0 ? 0 : order.length - 1) : (at + step + order.length) % order.length
   return order[next] ?? { kind: 'none' }
 }
+
+/** Where a gap is, as a selection. */
+export const selectionOfGap = ({ where: { bay, post } }: Gap): Selection =>
+  bay ? { kind: 'bay', id: bay } : post ? { kind: 'post', id: post } : { kind: 'none' }

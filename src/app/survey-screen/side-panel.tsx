@@ -1,0 +1,78 @@
+import { ChevronDown, ChevronUp } from 'lucide-react'
+import { useState } from 'react'
+import { IconButton } from '@/components/button'
+import { classes } from '@/components/classes'
+import { RectangleForm } from '@/features/survey-editor/chrome/rectangle-form'
+import type { EditorState } from '@/features/survey-editor/model/editor-state'
+import { nextGap } from '@shared/survey/find-gaps'
+import { photoOf } from '@/features/survey-editor/model/marks'
+import { selectionOfGap } from '@/features/survey-editor/model/selection'
+import { NextMissing } from '@/features/survey-editor/panels/next-missing'
+import { SelectionPanel } from '@/features/survey-editor/panels/selection-panel'
+import { lengthFormat } from '../length-format'
+import type { SurveySession } from '../survey-session'
+
+interface SidePanelProps {
+  session: SurveySession
+  state: EditorState
+  onCutList: () => void
+}
+
+/** What is selected, and what is missing: beside the photo on a desk, a sheet below it on a phone. */
+export function SidePanel({ session, state, onCutList }: SidePanelProps) {
+  const { view, actions, editor } = session
+  const [low, setLow] = useState(false)
+  const next = () => {
+    const gap = nextGap(editor.getSnapshot().survey)
+    actions.select(gap ? selectionOfGap(gap) : { kind: 'none' })
+  }
+  const { selection } = view
+  const photo = photoOf(view.survey, state.photoId)
+  const marked =
+    state.draft?.kind === 'rectangle' && state.draft.corners.length === 4 ? state.draft.corners : null
+  const isOpen = selection.kind !== 'none'
+  return (
+    <aside
+      aria-label="Panel"
+      className={classes(
+        'flex shrink-0 flex-col border-t border-rule bg-card md:w-96 md:border-t-0 md:border-l',
+        isOpen && !low ? 'max-h-[56%] md:max-h-none' : '',
+      )}
+    >
+      <div className="flex items-center border-b border-rule">
+        <div className="min-w-0 flex-1">
+          <NextMissing view={view} actions={actions} onCutList={onCutList} />
+        </div>
+        {isOpen && (
+          <IconButton
+            className="md:hidden"
+            label={low ? 'Raise the panel' : 'Lower the panel'}
+            onClick={() => setLow(!low)}
+          >
+            {low ? <ChevronUp aria-hidden="true" /> : <ChevronDown aria-hidden="true" />}
+          </IconButton>
+        )}
+      </div>
+      {isOpen && (
+        <div className={classes('min-h-0 flex-1 overflow-y-auto p-4', low && 'hidden md:block')}>
+          {selection.kind === 'rectangle' && photo ? (
+            <RectangleForm
+              key={`${photo.id} ${marked ? 'marked' : 'kept'}`}
+              photo={photo}
+              marked={marked}
+              format={lengthFormat(view.units, view.fraction)}
+              actions={actions}
+              canEdit={view.canEdit}
+              onDone={() => {
+                editor.chooseTool('select')
+                actions.select({ kind: 'none' })
+              }}
+            />
+          ) : (
+            <SelectionPanel view={view} actions={actions} onNext={next} />
+          )}
+        </div>
+      )}
+    </aside>
+  )
+}

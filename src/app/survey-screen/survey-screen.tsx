@@ -1,0 +1,104 @@
+import { lazy, Suspense, useEffect, useState, useSyncExternalStore } from 'react'
+import { useNavigate } from 'react-router-dom'
+import { Sheet } from '@/components/sheet'
+import { Loading } from '@/components/states'
+import { sayProblem } from '@/components/toast'
+import { EditorBar } from '@/features/survey-editor/chrome/editor-bar'
+import { KeysList } from '@/features/survey-editor/chrome/keys-list'
+import { ToolRail } from '@/features/survey-editor/chrome/tool-rail'
+import { SurveyPanel } from '@/features/survey-editor/panels/survey-panel'
+import { pictureAddress } from '@/features/surveys/api/add-photo'
+import { useWakeLock } from '@/lib/wake-lock'
+import { OfflineBanner } from '../offline-banner'
+import { paths } from '../paths'
+import { type Loaded, type SurveySession, useSurveySession } from '../survey-session'
+import { PhotoArea } from './photo-area'
+import { SidePanel } from './side-panel'
+import { useCaptions } from './use-captions'
+
+const PhotoCanvas = lazy(() => import('@/features/survey-editor/canvas/photo-canvas'))
+const pictureFailed = () =>
+  sayProblem(
+    'The photo could not be fetched. Check the signal and open the survey again; its marks are kept.',
+  )
+
+/** The editor's screen: photo in the middle, tools and panel around it; under the thumb on a phone. */
+export function SurveyScreen({ loaded }: { loaded: Loaded }) {
+  const session = useSurveySession(loaded)
+  const { editor, queueState, view, actions, record } = session
+  const state = useSyncExternalStore(editor.subscribe, editor.getSnapshot)
+  const [sheet, setSheet] = useState<'settings' | 'keys' | null>(null)
+  const captions = useCaptions(view)
+  const toCutList = useCutList(session)
+  useWakeLock()
+  useQuestionMark(() => setSheet('keys'))
+  useEffect(() => {
+    document.title = `${view.survey.title} · Tautbook`
+  }, [view.survey.title])
+  const photo = session.photos.find(({ surveyPhotoId }) => surveyPhotoId === state.photoId)
+  return (
+    <div className="fixed inset-0 flex flex-col bg-paper">
+      <EditorBar
+        title={view.survey.title}
+        back={{ to: paths.job(record.jobId), label: `Back to job ${record.jobNumber}` }}
+        saving={{ unsent: queueState.pending.length, waiting: queueState.waiting }}
+        undo={state.canUndo ? actions.undo : null}
+        redo={state.canRedo ? actions.redo : null}
+        links={{ table: paths.surveyTable(record.id), history: paths.surveyHistory(record.id) }}
+        onCutList={toCutList}
+        onSettings={() => setSheet('settings')}
+        onKeys={() => setSheet('keys')}
+      />
+      <OfflineBanner />
+      <div className="flex min-h-0 flex-1 flex-col-reverse md:flex-row">
+        <ToolRail editor={editor} tool={state.tool} canEdit={view.canEdit} />
+        <main className="flex min-h-0 min-w-0 flex-1 flex-col md:flex-row" id="content">
+          <PhotoArea session={session} state={state}>
+            <Suspense fallback={<Loading what="the photo" />}>
+              <PhotoCanvas
+                editor={editor}
+                captions={captions}
+                picture={photo ? pictureAddress(photo.id) : null}
+                onPictureFailed={pictureFailed}
+              />
+            </Suspense>
+          </PhotoArea>
+          <SidePanel session={session} state={state} onCutList={toCutList} />
+        </main>
+      </div>
+      <Sheet open={sheet === 'settings'} onOpenChange={() => setSheet(null)} title="Guard and units">
+        <SurveyPanel view={view} actions={actions} />
+      </Sheet>
+      <Sheet open={sheet === 'keys'} onOpenChange={() => setSheet(null)} title="Keys">
+        <KeysList />
+      </Sheet>
+    </div>
+  )
+}
+
+/** Goes to the cut list once what was changed has reached the server, so that the list is of this survey. */
+function useCutList({ queue, record }: SurveySession): () => void {
+  const navigate = useNavigate()
+  return () => {
+    void queue.settled().then(() => {
+      if (queue.getSnapshot().pending.length > 0) {
+        sayProblem(
+          'Some changes have not reached the server yet. They are kept on this screen; try again with signal.',
+        )
+        return undefined
+      }
+      return navigate(paths.cutList(record.id))
+    })
+  }
+}
+
+function useQuestionMark(show: () => void): void {
+  useEffect(() => {
+    const press = (event: KeyboardEvent) => {
+      const typing = event.target instanceof HTMLElement && event.target.matches('input, textarea, select')
+      if (event.key === '?' && !typing) show()
+    }
+    window.addEventListener('keydown', press)
+    return () => window.removeEventListener('keydown', press)
+  })
+}

@@ -1,0 +1,81 @@
+import {
+  ArrowLeft,
+  CircleHelp,
+  ClipboardList,
+  EllipsisVertical,
+  History,
+  Redo2,
+  Settings2,
+  Table2,
+  Undo2,
+} from 'lucide-react'
+import { Link } from 'react-router-dom'
+import { IconButton } from '@/components/button'
+import { Menu, MenuItem, MenuLink } from '@/components/menu'
+import { SaveState } from './save-state'
+
+interface EditorBarProps {
+  title: string
+  back: { to: string; label: string }
+  saving: { unsent: number; waiting: boolean }
+  undo: (() => void) | null
+  redo: (() => void) | null
+  links: { table: string; history: string }
+  onCutList: () => void
+  onSettings: () => void
+  onKeys: () => void
+}
+
+/** The bar above the photo: where one is, how far it is saved, and what is not a tool. */
+export function EditorBar({
+  title,
+  back,
+  saving,
+  undo,
+  redo,
+  links,
+  onCutList,
+  onSettings,
+  onKeys,
+}: EditorBarProps) {
+  return (
+    <header className="flex items-center gap-1 border-b border-rule bg-card px-1">
+      <Link to={back.to} aria-label={back.label} className="flex size-12 items-center justify-center rounded">
+        <ArrowLeft aria-hidden="true" />
+      </Link>
+      <div className="min-w-0 flex-1 py-1">
+        <h1 className="truncate text-base font-semibold">{title}</h1>
+        <SaveState {...saving} />
+      </div>
+      <IconButton label="Undo" disabled={!undo} onClick={() => undo?.()}>
+        <Undo2 aria-hidden="true" />
+      </IconButton>
+      <IconButton label="Redo" disabled={!redo} onClick={() => redo?.()}>
+        <Redo2 aria-hidden="true" />
+      </IconButton>
+      <Menu
+        trigger={
+          <IconButton label="More of this survey">
+            <EllipsisVertical aria-hidden="true" />
+          </IconButton>
+        }
+      >
+        <MenuItem onSelect={onCutList}>
+          <ClipboardList aria-hidden="true" className="size-5" /> Cut list
+        </MenuItem>
+        <MenuLink to={links.table}>
+          <Table2 aria-hidden="true" className="size-5" /> The survey as a table
+        </MenuLink>
+        <MenuLink to={links.history}>
+          <History aria-hidden="true" className="size-5" /> History
+        </MenuLink>
+        <MenuItem onSelect={onSettings}>
+          <Settings2 aria-hidden="true" className="size-5" /> Guard and units
+        </MenuItem>
+        <MenuItem onSelect={onKeys}>
+          <CircleHelp aria-hidden="true" className="size-5" /> Keys
+        </MenuItem>
+      </Menu>
+    </header>
+  )
+}

@@ -1,0 +1,87 @@
+import type { Bay } from '@shared/schemas/bay'
+import { toDegrees } from '@shared/units/angle'
+import { writeAngle } from '@shared/units/format-angle'
+import type { Length } from '@shared/units/length'
+import { ChoiceGroup } from '@/components/choices'
+import { FindingItem } from '@/components/finding-mark'
+import { TextField } from '@/components/field'
+import { LengthField } from '@/components/length-field'
+import { formatOf } from './format-of'
+import type { PanelProps } from './selection-panel'
+
+const tapes = [
+  { value: 'slope', label: 'Along the slope' },
+  { value: 'level', label: 'Level' },
+] as const
+
+/** A stair's angle by rise and going, by gauge, or both, and how its bay was taped. */
+export function StairFields({ view, actions, bay }: PanelProps & { bay: Bay }) {
+  const { canEdit } = view
+  const format = formatOf(view)
+  const keep = (key: 'rise' | 'going' | 'gauge', value: Length | number | undefined) =>
+    actions.perform({
+      type: 'bay.set',
+      id: bay.id,
+      set: value === undefined ? {} : { [key]: value },
+      unset: value === undefined ? [key] : [],
+    })
+  const computed =
+    bay.rise !== undefined && bay.going !== undefined ? toDegrees(Math.atan2(bay.rise, bay.going)) : undefined
+  const off = computed !== undefined && bay.gauge !== undefined ? Math.abs(computed - bay.gauge) : 0
+  return (
+    <div className="flex flex-col gap-3">
+      <div className="grid grid-cols-3 gap-3">
+        <LengthField
+          label="Rise"
+          value={bay.rise}
+          format={format}
+          disabled={!canEdit}
+          onChange={(value) => keep('rise', value)}
+        />
+        <LengthField
+          label="Going"
+          value={bay.going}
+          format={format}
+          disabled={!canEdit}
+          onChange={(value) => keep('going', value)}
+        />
+        <TextField
+          key={bay.gauge ?? 'none'}
+          label="Gauge, °"
+          type="number"
+          min={0}
+          max={80}
+          step="any"
+          inputMode="decimal"
+          defaultValue={bay.gauge ?? ''}
+          disabled={!canEdit}
+          onBlur={(event) => {
+            const given = event.target.value === '' ? undefined : event.target.valueAsNumber
+            const isFit = given === undefined || (given >= 0 && given <= 80)
+            if (isFit && given !== bay.gauge) keep('gauge', given)
+          }}
+        />
+      </div>
+      {computed === undefined ? null : (
+        <p>
+          Rise and going make <span className="figures font-medium text-spruce">{writeAngle(computed)}</span>.
+        </p>
+      )}
+      {off > 1 ? (
+        <FindingItem
+          finding={{
+            level: 'check',
+            text: `Rise and going differ from the gauge by ${writeAngle(off)}. Rise and going are used; take the doubtful one again.`,
+          }}
+        />
+      ) : null}
+      <ChoiceGroup
+        label="The tape lay"
+        choices={tapes}
+        value={bay.taped}
+        disabled={!canEdit}
+        onChange={(taped) => actions.perform({ type: 'bay.set', id: bay.id, set: { taped }, unset: [] })}
+      />
+    </div>
+  )
+}
