@@ -3,12 +3,22 @@ import type { Config } from './config'
 
 /** A one-time link is as good as a password until it is used, and a query may hold what people search for. */
 export const loggablePath = (url: string): string =>
-  url.replace(/\?.*$/, '').replace(/(\/(?:api\/)?invitations?\/)[^/]+/, '$1…')
+  url.replace(/\?.*$/, '').replace(/(\/(?:api\/)?(?:invite|invitations?)\/)[^/]+/, '$1…')
 
-/** Headers hold cookies, and what people look for is theirs alone. */
-const dropped = ['req.headers', 'req.query', 'req.params', 'res.headers']
+/** What lets somebody in; nobody means to write it, and it is not written even where somebody does. */
+const secrets = [
+  'password',
+  'current',
+  'next',
+  'token',
+  'csrf',
+  'csrfToken',
+  'cookie',
+  'authorization',
+  'headers',
+]
 
-/** One line of JSON per event. Of a request it has method, path and sender; never headers, query or body. */
+/** One line of JSON per event. What a request's line has is said in `http/request-log.ts`. */
 export function createLog({ logLevel }: Pick<Config, 'logLevel'>, to?: pino.DestinationStream): Logger {
   const options: pino.LoggerOptions = {
     level: logLevel,
@@ -16,9 +26,8 @@ export function createLog({ logLevel }: Pick<Config, 'logLevel'>, to?: pino.Dest
     timestamp: pino.stdTimeFunctions.isoTime,
     formatters: { level: (label) => ({ level: label }) },
     redact: {
-      paths: [...dropped, 'req.url'],
-      censor: (value, [, field]) =>
-        field === 'url' && typeof value === 'string' ? loggablePath(value) : undefined,
+      paths: secrets.flatMap((name) => [name, `*.${name}`]),
+      censor: '…',
     },
   }
   return to ? pino(options, to) : pino(options)

@@ -4,12 +4,14 @@ import type { Logger } from 'pino'
 import type { Problem } from '@shared/schemas/problem'
 import { AppError, notFound } from '../errors'
 import { loggablePath } from '../log'
+import { requestId } from './request-log'
 
 /** The one writer of refusals: problem+json for people and programs, the rest for the log. */
 export function errorHandler(log: Logger): ErrorRequestHandler {
   return (error: unknown, request, response, next) => {
     const known = asAppError(error)
     const entry = {
+      id: requestId(response),
       code: known.code,
       status: known.status,
       method: request.method,

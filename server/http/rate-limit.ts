@@ -12,7 +12,7 @@ export const generalLimit = (requestsPerMinute: number): RequestHandler =>
   rateLimit({
     windowMs: MINUTE,
     limit: requestsPerMinute,
-    standardHeaders: 'draft-8',
+    standardHeaders: 'draft-7',
     legacyHeaders: false,
     handler: (_request, _response, next) => next(tooMany('a minute')),
   })
@@ -22,7 +22,7 @@ export const guessLimit = (): RequestHandler =>
   rateLimit({
     windowMs: 15 * MINUTE,
     limit: 30,
-    standardHeaders: 'draft-8',
+    standardHeaders: 'draft-7',
     legacyHeaders: false,
     skipSuccessfulRequests: true,
     handler: (_request, _response, next) => next(tooMany('15 minutes')),
@@ -33,7 +33,7 @@ export const registerLimit = (): RequestHandler =>
   rateLimit({
     windowMs: 60 * MINUTE,
     limit: 30,
-    standardHeaders: 'draft-8',
+    standardHeaders: 'draft-7',
     legacyHeaders: false,
     handler: (_request, _response, next) => next(tooMany('an hour')),
   })

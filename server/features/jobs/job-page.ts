@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { keySchema } from '@shared/schemas/id'
+import type { Job } from '@shared/schemas/job'
 import { pageUnknown } from './jobs.errors'
-import type { JobRow } from './jobs.queries'
 
 const cursorSchema = z.discriminatedUnion('sort', [
   z.object({ sort: z.literal('updated'), at: z.iso.datetime(), id: keySchema }),
@@ -12,13 +12,13 @@ const cursorSchema = z.discriminatedUnion('sort', [
 export type JobCursor = z.infer<typeof cursorSchema>
 export type JobSort = JobCursor['sort']
 
-const cursorOf: Record<JobSort, (row: JobRow) => JobCursor> = {
+const cursorOf: Record<JobSort, (row: Job) => JobCursor> = {
   updated: ({ updatedAt, id }) => ({ sort: 'updated', at: updatedAt, id }),
   due: ({ due, id }) => ({ sort: 'due', due: due ?? 'infinity', id }),
   number: ({ number }) => ({ sort: 'number', number }),
 }
 
-export const writeCursor = (sort: JobSort, row: JobRow): string =>
+export const writeCursor = (sort: JobSort, row: Job): string =>
   Buffer.from(JSON.stringify(cursorOf[sort](row))).toString('base64url')
 
 /** @throws AppError 400 for what no page of this order has said. */

@@ -7,7 +7,7 @@ import { changeJob, createJob, jobLister, moveJob, readJob } from './jobs.servic
 export function jobsRoutes(router: Router, services: Services): void {
   const at = { router, services }
   const { database, clock } = services
-  route(at, jobs.listJobs, jobLister(database))
+  route(at, jobs.listJobs, jobLister(services.open))
   route(at, jobs.createJob, ({ companyId, body }) =>
     createJob(database, { companyId, fields: body, now: clock() }),
   )

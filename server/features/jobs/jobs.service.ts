@@ -1,7 +1,7 @@
 import type { z } from 'zod'
 import type { Job, jobChangesSchema, jobFieldsSchema, jobListQuerySchema, Stage } from '@shared/schemas/job'
 import type { SurveySummary } from '@shared/schemas/survey-record'
-import type { Database } from '../../database/client'
+import type { Database, OpenDatabase } from '../../database/client'
 import { listJobSurveys } from '../surveys/surveys.service'
 import { readCursor, writeCursor } from './job-page'
 import { noSuchJob, notAPerson } from './jobs.errors'
@@ -21,16 +21,19 @@ interface ListRequest {
   query: z.output<typeof jobListQuerySchema>
 }
 
+/** What follows more words than these is not looked at. */
+const MOST_WORDS = 10
+
 type JobLister = (request: ListRequest) => Promise<{ jobs: Job[]; next: string | null }>
 
 /** Answers with a page of the company's jobs, and where the next page begins. */
-export function jobLister(database: Database): JobLister {
-  const findPage = jobPageFinder(database)
+export function jobLister(open: OpenDatabase): JobLister {
+  const findPage = jobPageFinder(open)
   return async ({ companyId, query: { search = '', after, limit, sort, ...filter } }) => {
     const rows = await findPage({
       ...filter,
       companyId,
-      words: search.split(/\s+/).filter((word) => word !== ''),
+      words: search.split(/\s+/, MOST_WORDS).filter((word) => word !== ''),
       sort,
       after: after === undefined ? undefined : readCursor(sort, after),
       // One more than shown tells whether there is a next page.
