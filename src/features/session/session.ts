@@ -1,5 +1,5 @@
 import { queryOptions, useQuery } from '@tanstack/react-query'
-import { accounts } from '@shared/endpoints/accounts'
+import { signInAddresses } from './sign-in-addresses'
 import type { Ability } from '@shared/permissions/abilities'
 import { can } from '@shared/permissions/abilities'
 import type { Session } from '@shared/schemas/session'
@@ -8,7 +8,7 @@ import { call, keepToken } from '@/lib/api-client'
 export const sessionQuery = queryOptions({
   queryKey: ['session'],
   queryFn: async ({ signal }): Promise<Session | null> => {
-    const { session, csrfToken } = await call(accounts.readSession, { signal })
+    const { session, csrfToken } = await call(signInAddresses.readSession, { signal })
     keepToken(csrfToken)
     return session
   },
