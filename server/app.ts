@@ -1,5 +1,5 @@
 import path from 'node:path'
-import express, { type Express, Router } from 'express'
+import express, { type Express, type RequestHandler, Router } from 'express'
 import helmet from 'helmet'
 import { protectFromForgery } from './http/csrf'
 import { errorHandler, nothingHere } from './http/error-handler'
@@ -14,6 +14,8 @@ export function createApp(services: Services, { requestsPerMinute } = { requests
   const { config, log } = services
   const app = express()
   app.disable('x-powered-by')
+  // The interface's answers are kept nowhere or for good, so none is ever asked for again; files have tags of their own.
+  app.disable('etag')
   app.set('trust proxy', config.trustProxy ? 1 : false)
   app.use(requestLog(log))
   app.use(helmet(securityHeaders(config.secureCookies)))
@@ -21,10 +23,11 @@ export function createApp(services: Services, { requestsPerMinute } = { requests
   const api = Router()
   api.use(
     '/api',
+    keepNowhere,
     generalLimit(requestsPerMinute),
     express.json({ limit: '2mb' }),
     ...sessions(services),
-    protectFromForgery,
+    protectFromForgery(config),
   )
   featureRoutes(api, services)
   api.use('/api', nothingHere)
@@ -45,6 +48,12 @@ export function createApp(services: Services, { requestsPerMinute } = { requests
   })
   app.use(errorHandler(log))
   return app
+}
+
+/** What the interface answers is one person's and may be out of date tomorrow; a route that knows better says so. */
+const keepNowhere: RequestHandler = (_request, response, next) => {
+  response.set('Cache-Control', 'private, no-store')
+  next()
 }
 
 /** Everything comes from our own address; pictures may also be ones the page has just taken. */

@@ -1,5 +1,6 @@
 import { randomBytes, timingSafeEqual } from 'node:crypto'
 import type { Request, RequestHandler } from 'express'
+import type { Config } from '../config'
 import { AppError } from '../errors'
 
 const SAFE = new Set(['GET', 'HEAD', 'OPTIONS'])
@@ -15,16 +16,19 @@ export function csrfToken(request: Request): string {
  * Requests that change something must come from our own pages: the browser's Origin, where it sends one, is ours, and
  * the header carries the session's token (synchroniser token pattern).
  */
-export const protectFromForgery: RequestHandler = (request, _response, next) => {
-  if (SAFE.has(request.method)) return next()
-  const origin = request.get('origin')
-  if (origin !== undefined && hostOf(origin) !== request.get('host')) {
-    throw forged(`origin ${origin} for host ${request.get('host') ?? ''}`)
+export function protectFromForgery({ publicUrl }: Pick<Config, 'publicUrl'>): RequestHandler {
+  const publicHost = publicUrl === undefined ? undefined : hostOf(publicUrl)
+  return (request, _response, next) => {
+    if (SAFE.has(request.method)) return next()
+    const origin = request.get('origin')
+    if (origin !== undefined && ![publicHost, request.get('host')].includes(hostOf(origin))) {
+      throw forged(`origin ${origin} for host ${request.get('host') ?? ''}`)
+    }
+    const expected = request.session.csrf
+    const given = request.get(HEADER)
+    if (expected === undefined || given === undefined || !same(expected, given)) throw forged('token')
+    next()
   }
-  const expected = request.session.csrf
-  const given = request.get(HEADER)
-  if (expected === undefined || given === undefined || !same(expected, given)) throw forged('token')
-  next()
 }
 
 const forged = (log: string) =>

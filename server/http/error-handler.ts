@@ -57,6 +57,8 @@ function asAppError(error: unknown): AppError {
       'The request is not readable as JSON. Check the file and send it again.',
     )
   }
+  // A file of the client that is not there.
+  if (status === 404) return notFound('file')
   if (typeof status === 'number' && status >= 400 && status < 500) {
     return new AppError(status, 'not-valid', 'The server could not read this request. Try again.', {
       cause: error,
