@@ -22,19 +22,18 @@ export function presentSession(request: Request, person: SignedIn): Session {
 /** Begins a new session, under a new id and with a new token, for a person who has just shown who they are. */
 export async function beginSession(request: Request, person: SignedIn): Promise<Session> {
   // A new id, so that one planted before sign-in is worth nothing after it.
-  await new Promise<void>((resolve, reject) =>
-    request.session.regenerate((error: unknown) => (error ? reject(asError(error)) : resolve())),
-  )
+  await settled((done) => request.session.regenerate(done))
   request.session.person = { id: person.id, companyId: person.companyId }
   request.user = person
-  return presentSession(request, person)
+  const begun = presentSession(request, person)
+  // Kept before the answer begins: whoever has the cookie may use it at once.
+  await settled((done) => request.session.save(done))
+  return begun
 }
 
 /** Ends the session on the server and in the browser. */
 export async function endSession(request: Request, response: Response, config: Config): Promise<void> {
-  await new Promise<void>((resolve, reject) =>
-    request.session.destroy((error: unknown) => (error ? reject(asError(error)) : resolve())),
-  )
+  await settled((done) => request.session.destroy(done))
   response.clearCookie(cookieName(config), {
     httpOnly: true,
     sameSite: 'lax',
@@ -42,3 +41,9 @@ export async function endSession(request: Request, response: Response, config: C
     path: '/',
   })
 }
+
+type Done = (error?: unknown) => void
+const settled = (work: (done: Done) => unknown): Promise<void> =>
+  new Promise((resolve, reject) => {
+    work((error) => (error ? reject(asError(error)) : resolve()))
+  })
