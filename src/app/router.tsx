@@ -7,6 +7,7 @@ import { PageFault } from './page-fault'
 export const router = createBrowserRouter([
   {
     Component: RootLayout,
+    HydrateFallback: () => null,
     ErrorBoundary: PageFault,
     children: [
       { path: paths.signIn, lazy: () => import('./routes/sign-in') },

@@ -1,3 +1,102 @@
+import { useMemo } from 'react'
+import { Link, useParams } from 'react-router-dom'
+import { surveys as endpoints } from '@shared/endpoints/surveys'
+import { calculateSurvey } from '@shared/calculation/calculate-survey'
+import { cutListRows } from '@shared/cut-list/cut-list-rows'
+import { fittingsToPick } from '@shared/cut-list/fittings-to-pick'
+import type { Finding } from '@shared/schemas/finding'
+import { buttonClasses, ButtonLink } from '@/components/button'
+import { CutCautions } from '@/components/cautions'
+import { Page } from '@/components/page'
+import { EmptyState, ErrorNote, Loading } from '@/components/states'
+import { Findings, RunSection, Totals } from '@/features/cut-list/cut-list'
+import { PickList } from '@/features/cut-list/pick-list'
+import { useSession } from '@/features/session/session'
+import { messageOf } from '@/lib/api-error'
+import { lengthFormat } from '../length-format'
+import { paths } from '../paths'
+import { type Loaded, useSurveyData } from '../survey-session'
+
 export function Component() {
-  return null
+  const { surveyId = '' } = useParams()
+  const { data, error, retry } = useSurveyData(surveyId)
+  if (error) {
+    return (
+      <Page title="Cut list">
+        <ErrorNote message={messageOf(error)} onRetry={retry} />
+      </Page>
+    )
+  }
+  return data ? <CutList loaded={data} /> : <Loading what="the cut list" />
+}
+
+function CutList({ loaded: { record, hardware, rules } }: { loaded: Loaded }) {
+  const { company } = useSession()
+  const { survey } = record
+  const input = useMemo(() => ({ survey, hardware, rules }), [survey, hardware, rules])
+  const result = useMemo(() => calculateSurvey(input), [input])
+  const list = useMemo(() => cutListRows(result, input), [result, input])
+  const picks = useMemo(() => fittingsToPick(result, input), [result, input])
+  const format = lengthFormat(survey.units, company.fraction)
+  const file = (path: string) => path.replace(':surveyId', record.id)
+  const goThere = ({ where: { bay, post, run } }: Finding) => {
+    const place = bay ? `bay=${bay}` : post ? `post=${post}` : run ? `run=${run}` : ''
+    return place === '' ? null : (
+      <ButtonLink look="quiet" to={`${paths.survey(record.id)}?${place}`}>
+        Go there
+      </ButtonLink>
+    )
+  }
+  return (
+    <Page
+      title={`Cut list: ${survey.title}`}
+      above={
+        <>
+          <Link to={paths.jobs}>Jobs</Link> / <Link to={paths.job(record.jobId)}>{record.jobTitle}</Link>
+        </>
+      }
+      actions={
+        <>
+          <ButtonLink to={paths.survey(record.id)}>Survey</ButtonLink>
+          <a className={buttonClasses('primary')} href={file(endpoints.exportWorkbook.path)} download>
+            XLSX
+          </a>
+          <a className={buttonClasses('secondary')} href={file(endpoints.exportCsv.path)} download>
+            CSV
+          </a>
+        </>
+      }
+    >
+      {list.groups.length === 0 ? (
+        <EmptyState
+          title="No runs yet"
+          action={
+            <ButtonLink look="primary" to={paths.survey(record.id)}>
+              To the survey
+            </ButtonLink>
+          }
+        >
+          Put posts on the photo and join them into bays; the runs follow by themselves.
+        </EmptyState>
+      ) : (
+        <div className="flex flex-col gap-8">
+          <p className="text-lg">
+            <Totals totals={list.totals} format={format} />
+          </p>
+          <Findings findings={list.findings} goThere={goThere} />
+          {list.groups.map((group) => (
+            <RunSection
+              key={group.run.run}
+              group={group}
+              format={format}
+              workingOf={(run, cable) => paths.working(record.id, run, cable)}
+              goThere={goThere}
+            />
+          ))}
+          <PickList {...picks} format={format} />
+          <CutCautions />
+        </div>
+      )}
+    </Page>
+  )
 }

@@ -9,8 +9,10 @@ interface JobListProps {
   pathOf: (jobId: string) => string
 }
 
-function Due({ due }: { due: string | null }) {
+/** A finished job's date is no longer waited for. */
+function Due({ job: { due, stage } }: { job: Job }) {
   if (!due) return null
+  if (stage === 'done' || stage === 'lost') return <span className="whitespace-nowrap">{dateText(due)}</span>
   const today = new Date()
   return (
     <span className={classes('whitespace-nowrap', daysUntil(due, today) < 0 && 'font-medium text-marker')}>
@@ -35,7 +37,7 @@ export function JobList({ jobs, pathOf }: JobListProps) {
     { key: 'customer', header: 'Customer', cell: ({ customer }) => customer },
     { key: 'stage', header: 'Stage', cell: ({ stage }) => stage },
     { key: 'with', header: 'With', cell: ({ personName }) => personName },
-    { key: 'due', header: 'Due', cell: ({ due }) => <Due due={due} /> },
+    { key: 'due', header: 'Due', cell: (job) => <Due job={job} /> },
     { key: 'surveys', header: 'Surveys', figures: true, cell: ({ surveyCount }) => surveyCount },
   ]
   return (
@@ -60,7 +62,7 @@ export function JobList({ jobs, pathOf }: JobListProps) {
               </span>
               <span className="mt-1 flex flex-wrap justify-between gap-2">
                 <span className="font-medium text-spruce">{job.stage}</span>
-                <Due due={job.due} />
+                <Due job={job} />
               </span>
             </Link>
           </li>

@@ -1,4 +1,4 @@
-import type { PhotoPoint } from '@shared/geometry/point'
+import type { FindingLevel } from '@shared/schemas/finding'
 import { type Camera, type ScreenPoint, toScreen } from '../model/camera'
 import type { Captions } from '../model/captions'
 import type { EditorState } from '../model/editor-state'
@@ -18,41 +18,53 @@ const half = (a: ScreenPoint, b: ScreenPoint): ScreenPoint => ({
   screenY: (a.screenY + b.screenY) / 2,
 })
 
-/** Everything of the survey on this photo: rectangle, bays, posts, in that order, so that posts lie uppermost. */
-export function drawMarks(pen: Pen, { state, camera, captions, colours }: Drawing): void {
-  const photo = photoOf(state.survey, state.photoId)
-  if (!photo) return
+/** Everything of the survey on this photo: rectangle, lines, then labels, what is selected first, so that it is never covered. */
+export function drawMarks(pen: Pen, drawing: Drawing): void {
+  const { state, camera, captions } = drawing
+  if (!photoOf(state.survey, state.photoId)) return
   const strokes = drawnStrokes(state)
-  const place = (at: PhotoPoint) => toScreen(camera, at)
-  const selected = (kind: string, id: string) =>
-    state.selection.kind === kind && 'id' in state.selection && state.selection.id === id
-  drawRectangle(pen, { state, camera, captions, colours })
-  for (const bay of state.survey.bays) {
+  drawRectangle(pen, drawing)
+  const bays = state.survey.bays.flatMap((bay): Labelled[] => {
     const line = bayLine(bay, strokes)
-    if (!line) continue
-    const [from, to] = [place(line[0]), place(line[1])]
+    if (!line) return []
+    const [from, to] = [toScreen(camera, line[0]), toScreen(camera, line[1])]
     const caption = captions.bays.get(bay.id)
-    const colour = selected('bay', bay.id) ? colours.chalk : colours.core
-    pen.line([from, to], { colour, width: 2.5, dashed: caption?.missing ?? true })
-    const middle = half(from, to)
-    const width = pen.label(caption?.text ?? '?', middle, { colour })
-    if (caption?.level) pen.finding(caption.level, { ...middle, screenX: middle.screenX + width / 2 + 12 })
-  }
-  for (const [id, stroke] of strokes) {
-    const isSelected = selected('post', id)
-    drawStroke(pen, {
-      stroke,
-      camera,
-      colour: isSelected ? colours.chalk : colours.core,
-      handles: isSelected,
+    const selected = isSelected(state, 'bay', bay.id)
+    pen.line([from, to], {
+      colour: colourOf(drawing, selected),
+      width: 2.5,
+      dashed: caption?.missing ?? true,
     })
-    const top = place(stroke.top)
-    const flag = { screenX: top.screenX, screenY: top.screenY - 16 }
-    const width = pen.label(id, flag, { colour: isSelected ? colours.chalk : colours.core, size: 14 })
-    const level = captions.posts.get(id)
-    if (level) pen.finding(level, { ...flag, screenX: flag.screenX + width / 2 + 11 })
+    return [
+      { text: caption?.text ?? '?', at: half(from, to), level: caption?.level ?? null, selected, size: 15 },
+    ]
+  })
+  const posts = [...strokes].map(([id, stroke]): Labelled => {
+    const selected = isSelected(state, 'post', id)
+    drawStroke(pen, { stroke, camera, colour: colourOf(drawing, selected), handles: selected })
+    const top = toScreen(camera, stroke.top)
+    const at = { screenX: top.screenX, screenY: top.screenY - 16 }
+    return { text: id, at, level: captions.posts.get(id) ?? null, selected, size: 14 }
+  })
+  const labels = [...posts, ...bays].sort((a, b) => Number(b.selected) - Number(a.selected))
+  for (const { text, at, level, selected, size } of labels) {
+    const edge = pen.label(text, at, { colour: colourOf(drawing, selected), size, must: selected })
+    if (level) pen.finding(level, edge ? { ...edge, screenX: edge.screenX + 12 } : at)
   }
 }
+
+interface Labelled {
+  text: string
+  at: ScreenPoint
+  level: FindingLevel | null
+  selected: boolean
+  size: number
+}
+
+const isSelected = ({ selection }: EditorState, kind: 'post' | 'bay', id: string): boolean =>
+  selection.kind === kind && selection.id === id
+const colourOf = ({ colours }: Drawing, selected: boolean): string =>
+  selected ? colours.chalk : colours.core
 
 /** The strokes as they stand, the one in hand where the hand has it. */
 function drawnStrokes(state: EditorState): Map<string, Stroke> {

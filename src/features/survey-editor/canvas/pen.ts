@@ -7,6 +7,9 @@ export type Line = readonly ScreenPoint[]
 
 /** Draws marks so that they read on any picture: a light core in a dark halo. Everything is in screen pixels. */
 export class Pen {
+  /** Labels drawn so far, so that none covers another. */
+  private readonly taken: Box[] = []
+
   constructor(
     private readonly context: Context,
     private readonly colours: DrawingColours,
@@ -45,27 +48,42 @@ export class Pen {
     context.stroke()
   }
 
-  /** A label on a dark ground, its middle at a place; answers its width. */
+  /**
+   * A label on a dark ground, its middle at a place; where another one lies it moves up, or stays away. Answers where
+   * its right edge is.
+   */
   label(
     text: string,
     { screenX, screenY }: ScreenPoint,
-    { colour = this.colours.core, size = 15 } = {},
-  ): number {
+    { colour = this.colours.core, size = 15, must = false } = {},
+  ): ScreenPoint | undefined {
     const { context } = this
     context.font = `600 ${size}px "Barlow Semi Condensed", sans-serif`
+    const width = context.measureText(text).width + 12
+    const height = size + 8
+    const box = (y: number) => ({
+      left: screenX - width / 2,
+      right: screenX + width / 2,
+      top: y - height / 2,
+      bottom: y + height / 2,
+    })
+    const free = [screenY, screenY - height - 2].find(
+      (y) => !this.taken.some((other) => overlap(other, box(y))),
+    )
+    const y = free ?? (must ? screenY : undefined)
+    if (y === undefined) return undefined
+    this.taken.push(box(y))
     context.textAlign = 'center'
     context.textBaseline = 'middle'
-    const width = context.measureText(text).width + 14
-    const height = size + 9
     context.beginPath()
-    context.roundRect(screenX - width / 2, screenY - height / 2, width, height, 6)
+    context.roundRect(screenX - width / 2, y - height / 2, width, height, 6)
     context.globalAlpha = 0.88
     context.fillStyle = this.colours.halo
     context.fill()
     context.globalAlpha = 1
     context.fillStyle = colour
-    context.fillText(text, screenX, screenY + 1)
-    return width
+    context.fillText(text, screenX, y + 1)
+    return { screenX: screenX + width / 2, screenY: y }
   }
 
   /** A finding's shape: triangle for a check, octagon for a stop. */
@@ -110,3 +128,13 @@ export class Pen {
     )
   }
 }
+
+interface Box {
+  left: number
+  top: number
+  right: number
+  bottom: number
+}
+
+const overlap = (a: Box, b: Box): boolean =>
+  a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom
