@@ -1,3 +1,42 @@
+import { useQuery } from '@tanstack/react-query'
+import { useState } from 'react'
+import { Button } from '@/components/button'
+import { Page } from '@/components/page'
+import { Sheet } from '@/components/sheet'
+import { ErrorNote, Loading } from '@/components/states'
+import { AddPerson } from '@/features/people/add-person'
+import { peopleQuery } from '@/features/people/api/list-people'
+import { PersonCard } from '@/features/people/person-card'
+import { useMay, useSession } from '@/features/session/session'
+import { messageOf } from '@/lib/api-error'
+
 export function Component() {
-  return null
+  const { person: self } = useSession()
+  const mayManage = useMay('people:manage')
+  const [adding, setAdding] = useState(false)
+  const { data: people, error, isPending, refetch } = useQuery(peopleQuery)
+  return (
+    <Page
+      title="People"
+      actions={
+        mayManage ? (
+          <Button look="primary" onClick={() => setAdding(true)}>
+            Add a person
+          </Button>
+        ) : null
+      }
+    >
+      {isPending ? <Loading what="the people" /> : null}
+      {error ? <ErrorNote message={messageOf(error)} onRetry={() => void refetch()} /> : null}
+      {mayManage ? null : <p className="mb-4 text-soft">An owner adds people and gives roles.</p>}
+      <ul className="grid gap-3 md:grid-cols-2">
+        {people?.map((person) => (
+          <PersonCard key={person.id} person={person} mayManage={mayManage} isSelf={person.id === self.id} />
+        ))}
+      </ul>
+      <Sheet open={adding} onOpenChange={setAdding} title="Add a person">
+        <AddPerson />
+      </Sheet>
+    </Page>
+  )
 }

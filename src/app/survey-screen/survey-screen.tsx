@@ -1,5 +1,5 @@
 import { lazy, Suspense, useEffect, useState, useSyncExternalStore } from 'react'
-import { useNavigate } from 'react-router-dom'
+import { useNavigate, useSearchParams } from 'react-router-dom'
 import { Sheet } from '@/components/sheet'
 import { Loading } from '@/components/states'
 import { sayProblem } from '@/components/toast'
@@ -31,6 +31,7 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
   const captions = useCaptions(view)
   const toCutList = useCutList(session)
   useWakeLock()
+  useOpenAt(session)
   useQuestionMark(() => setSheet('keys'))
   useEffect(() => {
     document.title = `${view.survey.title} · Tautbook`
@@ -90,6 +91,18 @@ function useCutList({ queue, record }: SurveySession): () => void {
       return navigate(paths.cutList(record.id))
     })
   }
+}
+
+/** An address with `?bay=B2` opens the survey with that in hand: where a finding leads. */
+function useOpenAt({ actions }: SurveySession): void {
+  const [search] = useSearchParams()
+  const { select } = actions
+  useEffect(() => {
+    for (const kind of ['bay', 'post', 'run'] as const) {
+      const id = search.get(kind)
+      if (id) select({ kind, id })
+    }
+  }, [search, select])
 }
 
 function useQuestionMark(show: () => void): void {
