@@ -7,7 +7,7 @@ import { generalLimit } from './http/rate-limit'
 import { requestLog } from './http/request-log'
 import { sessions } from './http/sessions'
 import type { Services } from './services'
-import { featureRoutes } from './features/routes'
+import { featureRoutes } from './features/all.routes'
 
 /** The whole server over its services: what every request passes, then the features, then the client's files. */
 export function createApp(services: Services, { requestsPerMinute } = { requestsPerMinute: 1200 }): Express {

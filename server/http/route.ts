@@ -2,7 +2,7 @@ import type { Request, RequestHandler, Response, Router } from 'express'
 import type { z } from 'zod'
 import type { Endpoint } from '@shared/endpoints/endpoint'
 import { can } from '@shared/permissions/abilities'
-import { type AppError, notAllowed, notSignedIn } from '../errors'
+import { notAllowed, notSignedIn } from '../errors'
 import type { Services } from '../services'
 import type { SignedIn } from './signed-in'
 import { validate } from './validate'
@@ -28,7 +28,8 @@ export interface Call<Params, Query, Body> {
  * limit (before, in `app.ts`) → person → allowed → valid → handler, which calls a service → present.
  * A handler that answers by itself (a file) returns `undefined` after doing so.
  *
- * To add an endpoint: describe it in `shared/endpoints`, then call this in the feature's `X.routes.ts`.
+ * To add an endpoint: describe it in `shared/endpoints`, call this in the feature's `X.routes.ts`, and say in
+ * `tests/server/features/X/X.endpoints.ts` what is sent and what must come of it; a test fails until all three are there.
  */
 export function route<
   Params extends z.ZodType,
@@ -86,10 +87,4 @@ function present({ endpoint, response, checked }: Answering, answer: unknown): v
   }
   if (checked) endpoint.response.parse(answer)
   response.status(endpoint.status ?? 200).json(answer)
-}
-
-/** For routes that need a thing to exist: its own sentence, or 404. */
-export function found<Thing>(thing: Thing | undefined | null, error: () => AppError): Thing {
-  if (thing === undefined || thing === null) throw error()
-  return thing
 }

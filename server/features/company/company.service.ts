@@ -32,7 +32,7 @@ export async function registerCompany(database: Database, registration: Registra
 }
 
 /** A company with the starter hardware and house rules, and nobody in it yet. */
-export async function createCompany(transaction: Database, { name, units }: { name: string; units: Units }) {
+async function createCompany(transaction: Database, { name, units }: { name: string; units: Units }) {
   const company = await insertCompany(transaction, { name, lengthUnit: units.length, forceUnit: units.force })
   await stockCompany(company.id, transaction)
   return company
