@@ -1,8 +1,11 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
 import { accounts } from '@shared/endpoints/accounts'
 import { jobs } from '@shared/endpoints/jobs'
+import type { Request } from 'express'
+import type { SessionData } from 'express-session'
 import { people } from '../../../../server/database/tables/people'
 import { sessions } from '../../../../server/database/tables/sessions'
+import { SessionStore } from '../../../../server/http/session-store'
 import { createPerson, testPassword } from '../../../factories/person'
 import { openTestDatabase, type TestDatabase } from '../../../setup/database'
 import { signedIn, visitor } from '../../../support/client'
@@ -124,6 +127,31 @@ describe('a session', () => {
     expect((await client.send(accounts.changeCompany, { body: { fraction: 32 } })).status).toBe(200)
     await database.database.update(people).set({ roles: ['shop'] })
     expect((await client.send(accounts.changeCompany, { body: { fraction: 16 } })).status).toBe(403)
+  })
+})
+
+describe('a session of somebody disabled', () => {
+  it('is nobody’s, even where its row is still there', async () => {
+    const person = await createPerson(database.database)
+    const client = await signedIn(test.app, person)
+    await database.database.update(people).set({ disabledAt: now })
+    expect((await client.send(jobs.listJobs)).status).toBe(401)
+  })
+
+  it('does not come back when a request that was under way writes it after it has ended', async () => {
+    const person = await createPerson(database.database)
+    const body = { email: person.email, password: testPassword }
+    const { headers } = await visitor(test.app).send(accounts.signIn, { body })
+    const id = /tautbook=s%3A([^.]+)\./.exec(String(headers['set-cookie']))?.[1] ?? ''
+    const store = new SessionStore(database.database, () => now)
+    const underWay = await new Promise<SessionData>((resolve) =>
+      store.get(id, (_error, found) => resolve(found as SessionData)),
+    )
+    expect(underWay).toMatchObject({ person: { id: person.id } })
+    const session = store.createSession({ sessionID: id } as Request, underWay)
+    await database.database.delete(sessions)
+    await new Promise((resolve) => store.set(id, session, resolve))
+    expect(await database.database.select().from(sessions)).toEqual([])
   })
 })
 
