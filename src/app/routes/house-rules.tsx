@@ -1,3 +1,33 @@
+import { useQuery } from '@tanstack/react-query'
+import { Page } from '@/components/page'
+import { ErrorNote, Loading } from '@/components/states'
+import { houseRulesQuery } from '@/features/hardware/api/read-house-rules'
+import { HouseRulesForm } from '@/features/hardware/house-rules-form'
+import { useMay, useSession } from '@/features/session/session'
+import { messageOf } from '@/lib/api-error'
+import { lengthFormat } from '../length-format'
+
 export function Component() {
-  return null
+  const { company } = useSession()
+  const mayEdit = useMay('house-rules:edit')
+  const { data, error, isPending, refetch } = useQuery(houseRulesQuery)
+  return (
+    <Page title="House rules">
+      <p className="mb-4 text-soft">
+        {mayEdit
+          ? 'Tolerances, limits and defaults of your company. Every cut list is worked out with them.'
+          : 'Tolerances, limits and defaults every cut list is worked out with. An owner of your company changes them.'}
+      </p>
+      {isPending ? <Loading what="the house rules" /> : null}
+      {error ? <ErrorNote message={messageOf(error)} onRetry={() => void refetch()} /> : null}
+      {data ? (
+        <HouseRulesForm
+          rules={data}
+          units={company.units}
+          format={lengthFormat(company.units, 64)}
+          readOnly={!mayEdit}
+        />
+      ) : null}
+    </Page>
+  )
 }

@@ -15,7 +15,7 @@ export function AddPerson() {
   const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const form = new FormData(event.currentTarget)
-    const text = (name: string) => String(form.get(name) as string | null)
+    const text = (name: string) => String(form.get(name))
     invite.mutate({ name: text('name'), email: text('email'), roles })
   }
   if (invite.data) {

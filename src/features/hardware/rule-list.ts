@@ -1,0 +1,185 @@
+import type { HouseRules } from '@shared/schemas/house-rules'
+import type { Length } from '@shared/units/length'
+
+/** Rules that are lengths. */
+export type LengthRule = {
+  [Key in keyof HouseRules]-?: NonNullable<HouseRules[Key]> extends Length ? Key : never
+}[keyof HouseRules]
+
+export type Rule =
+  | { kind: 'length'; key: LengthRule; label: string; meaning: string; optional?: boolean }
+  | {
+      kind: 'number'
+      key: 'gaugeLimit' | 'maxBend' | 'reserve'
+      label: string
+      meaning: string
+      percent?: boolean
+    }
+  | { kind: 'force'; key: 'tension'; label: string; meaning: string }
+  | {
+      kind: 'choice'
+      key: 'stacking' | 'grouping' | 'tapeClass'
+      label: string
+      meaning: string
+      choices: readonly { value: string; label: string }[]
+    }
+
+/** Every house rule with its meaning in one sentence, grouped as the work goes. */
+export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = [
+  {
+    title: 'Measuring',
+    rules: [
+      {
+        kind: 'length',
+        key: 'readingLimit',
+        label: 'Reading limit',
+        meaning: 'How far one reading of the tape may be off; several readings of a bay share it.',
+      },
+      {
+        kind: 'choice',
+        key: 'tapeClass',
+        label: 'Tape class',
+        meaning: 'Accuracy class printed on the tape (2014/32/EU, Annex X); none adds nothing.',
+        choices: [
+          { value: '', label: 'none' },
+          { value: 'I', label: 'I' },
+          { value: 'II', label: 'II' },
+          { value: 'III', label: 'III' },
+        ],
+      },
+      {
+        kind: 'number',
+        key: 'gaugeLimit',
+        label: 'Gauge limit, °',
+        meaning: 'How far the angle gauge may be off.',
+      },
+      {
+        kind: 'length',
+        key: 'plumbLimit',
+        label: 'Plumb limit',
+        meaning: 'Top and bottom of a bay may differ by this before a post is said to lean.',
+      },
+    ],
+  },
+  {
+    title: 'Cutting and crimping',
+    rules: [
+      {
+        kind: 'length',
+        key: 'cutStep',
+        label: 'Cut step',
+        meaning: 'Cut lengths are rounded up to a whole number of these.',
+      },
+      { kind: 'length', key: 'cutLimit', label: 'Cut limit', meaning: 'How far a cut may be off.' },
+      {
+        kind: 'length',
+        key: 'seatLimit',
+        label: 'Seat limit',
+        meaning: 'How far a cable’s end may sit from where it should in its fitting.',
+      },
+      {
+        kind: 'length',
+        key: 'trim',
+        label: 'Trim',
+        meaning: 'What a cable that is finished on site gets beyond its worst length.',
+      },
+      {
+        kind: 'choice',
+        key: 'stacking',
+        label: 'Stacking',
+        meaning: 'How limits add up: by root of the sum of squares, or as if all fell the wrong way at once.',
+        choices: [
+          { value: 'rss', label: 'root of squares' },
+          { value: 'worst', label: 'plain sum' },
+        ],
+      },
+      {
+        kind: 'choice',
+        key: 'grouping',
+        label: 'Lengths',
+        meaning: 'One length for each cable, or one for a whole run where every cable of it allows that.',
+        choices: [
+          { value: 'cable', label: 'each cable' },
+          { value: 'run', label: 'the run' },
+        ],
+      },
+    ],
+  },
+  {
+    title: 'Fittings and tension',
+    rules: [
+      {
+        kind: 'force',
+        key: 'tension',
+        label: 'Tension',
+        meaning: 'What runs are tensioned to where the run says nothing else.',
+      },
+      {
+        kind: 'number',
+        key: 'reserve',
+        label: 'Reserve, %',
+        meaning: 'Share of the take-up kept for later re-tensioning.',
+        percent: true,
+      },
+      {
+        kind: 'length',
+        key: 'backWall',
+        label: 'Back wall',
+        meaning: 'What a drilled hole leaves of the post behind it at least.',
+      },
+      {
+        kind: 'length',
+        key: 'cornerOverlap',
+        label: 'Corner overlap',
+        meaning: 'Holes from two faces of a corner post may meet by this much before one run is staggered.',
+      },
+      {
+        kind: 'length',
+        key: 'cornerWeb',
+        label: 'Corner web',
+        meaning: 'What a stagger leaves of the post between the two holes.',
+      },
+    ],
+  },
+  {
+    title: 'Runs and heights',
+    rules: [
+      {
+        kind: 'length',
+        key: 'longestRun',
+        label: 'Longest run',
+        meaning: 'Proposed runs are no longer; left empty only the fittings limit them.',
+        optional: true,
+      },
+      {
+        kind: 'number',
+        key: 'maxBend',
+        label: 'Largest bend, °',
+        meaning: 'A run may change its pitch by this much at a post.',
+      },
+      {
+        kind: 'length',
+        key: 'holeStep',
+        label: 'Hole step',
+        meaning: 'Heights of holes are rounded to a whole number of these.',
+      },
+      {
+        kind: 'length',
+        key: 'wideBay',
+        label: 'Wide bay',
+        meaning: 'A clear bay beyond this wants a spacer.',
+      },
+    ],
+  },
+  {
+    title: 'Reels',
+    rules: [
+      {
+        kind: 'length',
+        key: 'keepOffcut',
+        label: 'Offcut to keep',
+        meaning: 'What is left of a reel goes back on the rack when it is at least this long.',
+      },
+    ],
+  },
+]
