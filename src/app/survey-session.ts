@@ -2,10 +2,7 @@ import { useQuery } from '@tanstack/react-query'
 import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
 import type { Hardware } from '@shared/schemas/hardware'
 import type { HouseRules } from '@shared/schemas/house-rules'
-import type { Survey } from '@shared/schemas/survey'
 import type { PhotoRecord, SurveyRecord } from '@shared/schemas/survey-record'
-import { proposeRuns } from '@shared/survey/propose-runs'
-import { longestRun } from '@shared/survey/longest-run'
 import { sayProblem } from '@/components/toast'
 import { hardwareQuery } from '@/features/hardware/api/read-hardware'
 import { houseRulesQuery } from '@/features/hardware/api/read-house-rules'
@@ -19,6 +16,8 @@ import { readHistory } from '@/features/surveys/api/read-history'
 import { readSurvey, surveyQuery } from '@/features/surveys/api/read-survey'
 import { ChangeQueue } from '@/features/surveys/change-queue'
 import type { QueueState } from '@/features/surveys/change-queue-step'
+
+import { proposeRunsOf } from './propose-runs-of'
 
 /** One survey in hand: what its screens show and do, and how far it is saved. */
 export interface SurveySession {
@@ -93,7 +92,6 @@ export function useSurveySession(loaded: Loaded): SurveySession {
 }
 
 function open({ record, hardware, rules }: Loaded, canEdit: boolean) {
-  const cable = hardware.cables[0]?.id
   const queue: ChangeQueue = new ChangeQueue(record, {
     send: (body) => changeSurvey(record.id, body),
     reread: (since) => reread(record.id, since),
@@ -107,14 +105,7 @@ function open({ record, hardware, rules }: Loaded, canEdit: boolean) {
     canEdit,
     onOperation: queue.perform,
     onRefusal: sayProblem,
-    runsFor: (survey: Survey) =>
-      cable === undefined
-        ? []
-        : proposeRuns(survey, {
-            cable,
-            maxBend: rules.maxBend,
-            longestRun: longestRun(hardware, rules, survey.runs[0]?.cable ?? cable),
-          }),
+    runsFor: proposeRunsOf({ hardware, rules }),
   })
   return { editor, queue }
 }
