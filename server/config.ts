@@ -78,8 +78,9 @@ export function readConfig(environment: NodeJS.ProcessEnv, root: string = proces
     databaseUrl: data.DATABASE_URL,
     sessionSecret: data.SESSION_SECRET,
     publicUrl: data.PUBLIC_URL?.replace(/\/$/, ''),
-    secureCookies: data.PUBLIC_URL?.startsWith('https:') ?? false,
-    trustProxy: data.TRUST_PROXY === 'yes',
+    secureCookies: isHttps(data.PUBLIC_URL),
+    // We speak no TLS ourselves: an https address means that a proxy in front does.
+    trustProxy: data.TRUST_PROXY === 'yes' || isHttps(data.PUBLIC_URL),
     demo: data.TAUTBOOK_DEMO === 'yes',
     logLevel: data.LOG_LEVEL,
     photoFolder: path.resolve(root, data.TAUTBOOK_DATA, 'photos'),
@@ -88,6 +89,8 @@ export function readConfig(environment: NodeJS.ProcessEnv, root: string = proces
     demoFolder: path.join(root, 'demo'),
   }
 }
+
+const isHttps = (address: string | undefined): boolean => address?.startsWith('https:') ?? false
 
 const sentenceFor = (issue: z.core.$ZodIssue): string => {
   const name = issue.path.join('.')

@@ -33,9 +33,13 @@ describe('readConfig', () => {
     })
   })
 
-  it('sends cookies over TLS alone when the address is https', () => {
+  it('sends cookies over TLS alone, and believes the proxy that speaks it, when the address is https', () => {
     const config = readConfig({ ...good, PUBLIC_URL: 'https://book.example.com/' })
-    expect(config).toMatchObject({ secureCookies: true, publicUrl: 'https://book.example.com' })
+    expect(config).toMatchObject({
+      secureCookies: true,
+      trustProxy: true,
+      publicUrl: 'https://book.example.com',
+    })
   })
 
   it('refuses an address whose password cannot be read', () => {
