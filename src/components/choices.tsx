@@ -14,6 +14,8 @@ interface ChoiceGroupProps<Value extends string> {
   onChange: (value: Value) => void
   disabled?: boolean
   hint?: ReactNode
+  /** The label is spoken but not shown, where what is shown beside says it. */
+  quiet?: boolean
 }
 
 /** A few choices side by side, one of them taken: radio buttons that look like one control. */
@@ -24,11 +26,12 @@ export function ChoiceGroup<Value extends string>({
   onChange,
   disabled,
   hint,
+  quiet = false,
 }: ChoiceGroupProps<Value>) {
   const name = useId()
   return (
     <fieldset disabled={disabled} className="min-w-0">
-      <legend className="mb-1 text-sm font-medium text-soft">{label}</legend>
+      <legend className={quiet ? 'sr-only' : 'mb-1 text-sm font-medium text-soft'}>{label}</legend>
       <div className="flex flex-wrap gap-1">
         {choices.map((choice) => (
           <label

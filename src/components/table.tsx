@@ -24,7 +24,7 @@ interface TableProps<Row> {
 export function Table<Row>({ caption, columns, rows, keyOf, className }: TableProps<Row>) {
   const cell = (column: Column<Row>) =>
     classes(
-      'px-3 py-2',
+      'px-2 py-2 md:px-3',
       column.figures === true && 'text-right',
       column.wideOnly === true && 'hidden md:table-cell',
     )

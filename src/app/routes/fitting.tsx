@@ -28,7 +28,7 @@ export function Component() {
           key={key ?? 'new'}
           {...(known ? { known } : {})}
           cables={data.cables.filter(({ retired }) => !retired).map(({ cable }) => cable)}
-          format={lengthFormat(company.units, company.fraction)}
+          format={lengthFormat(company.units, 64)}
           readOnly={!mayEdit}
           onSaved={() => {
             sayDone('The fitting is saved.')

@@ -18,7 +18,7 @@ export function Component() {
   const mayEdit = useMay('hardware:edit')
   const { data, error, isPending, refetch } = useQuery(hardwareQuery)
   const retire = useRetire()
-  const shown = (nm: number) => writeLength(nm, lengthFormat(company.units, company.fraction))
+  const shown = (nm: number) => writeLength(nm, lengthFormat(company.units, 64))
   const turn = (kind: Retirement['kind']) => (line: CatalogueLine) => {
     const change = { kind, key: line.key, retired: !line.retired }
     retire.mutate(change, {

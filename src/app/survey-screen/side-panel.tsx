@@ -36,7 +36,7 @@ export function SidePanel({ session, state, onCutList }: SidePanelProps) {
       aria-label="Panel"
       className={classes(
         'flex shrink-0 flex-col border-t border-rule bg-card md:w-96 md:border-t-0 md:border-l',
-        isOpen && !low ? 'max-h-[56%] md:max-h-none' : '',
+        isOpen && !low ? 'max-h-[66%] md:max-h-none' : '',
       )}
     >
       <div className="flex items-center border-b border-rule">

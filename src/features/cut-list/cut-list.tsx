@@ -5,6 +5,7 @@ import type { LengthFormat } from '@shared/units/format-length'
 import { FindingItem } from '@/components/finding-mark'
 import { Length } from '@/components/length'
 import { RunTable } from './run-table'
+import { modeWords } from './words'
 
 interface RunSectionProps {
   group: CutListGroup
@@ -28,6 +29,13 @@ export function RunSection({ group, format, workingOf, goThere }: RunSectionProp
         </p>
       </div>
       <Findings findings={findings} goThere={goThere} />
+      {(['shop', 'site', 'none'] as const).map((mode) =>
+        group.totals[mode] > 0 ? (
+          <p key={mode} className="text-sm text-soft">
+            <strong className="font-medium text-ink">{mode}</strong>: {modeWords[mode]}
+          </p>
+        ) : null,
+      )}
       {group.rows.length > 0 ? (
         <RunTable group={group} format={format} workingOf={workingOf} />
       ) : (

@@ -4,7 +4,7 @@ import { type LengthFormat, writeLength } from '@shared/units/format-length'
 import { Length } from '@/components/length'
 import { type Column, Table } from '@/components/table'
 import { TakeUpBar } from './take-up-bar'
-import { modeWords, whyWords } from './words'
+import { whyWords } from './words'
 
 interface RunTableProps {
   group: CutListGroup
@@ -25,7 +25,7 @@ export function RunTable({ group, format, workingOf }: RunTableProps) {
       cell: ({ name, cable }) => (
         <Link
           to={workingOf(cable.run, cable.cable)}
-          className="inline-flex min-h-10 items-center font-medium text-spruce underline"
+          className="inline-flex min-h-10 items-center whitespace-nowrap font-medium text-spruce underline"
           aria-label={`Working of cable ${name}`}
         >
           {name}
@@ -47,7 +47,7 @@ export function RunTable({ group, format, workingOf }: RunTableProps) {
         </>
       ),
     },
-    { key: 'mode', header: 'Mode', cell: ({ cable }) => modeWords[cable.mode] },
+    { key: 'mode', header: 'Mode', cell: ({ cable }) => cable.mode },
     { key: 'height', header: 'Height', figures: true, cell: ({ cable }) => computed(cable.height) },
     { key: 'path', header: 'Path', figures: true, wideOnly: true, cell: ({ cable }) => computed(cable.path) },
     {
@@ -78,6 +78,10 @@ export function RunTable({ group, format, workingOf }: RunTableProps) {
   )
 }
 
+/** Take-up is a matter of 64ths. */
+const finer = (format: LengthFormat): LengthFormat =>
+  format.style === 'millimetres' ? format : { ...format, finest: 64 }
+
 function TakeUp({
   cable,
   format,
@@ -85,7 +89,7 @@ function TakeUp({
   cable: Exclude<CutListRow['cable'], { mode: 'none' }>
   format: LengthFormat
 }) {
-  const shown = (nm: number) => writeLength(nm, format)
+  const shown = (nm: number) => writeLength(nm, finer(format))
   const words = `${shown(cable.planned)} planned, ${shown(cable.worst)} at worst, of ${shown(cable.limit)}`
   return (
     <div className="min-w-32">

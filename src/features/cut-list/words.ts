@@ -1,9 +1,9 @@
 import type { CableResult, WhyNone } from '@shared/calculation/result'
 
 export const modeWords: Record<CableResult['mode'], string> = {
-  shop: 'shop: both ends crimped',
-  site: 'site: second end on site',
-  none: 'no length',
+  shop: 'both ends are crimped in the shop',
+  site: 'the second end is cut and crimped on site',
+  none: 'no length can be given',
 }
 
 export const whyWords: Record<WhyNone, string> = {

@@ -14,9 +14,11 @@ export function AddPerson() {
   const invite = useInvite()
   const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
-    const form = new FormData(event.currentTarget)
-    const text = (name: string) => String(form.get(name))
-    invite.mutate({ name: text('name'), email: text('email'), roles })
+    const { name = '', email = '' } = Object.fromEntries(new FormData(event.currentTarget)) as Record<
+      string,
+      string
+    >
+    invite.mutate({ name, email, roles })
   }
   if (invite.data) {
     const { person, link, expires } = invite.data

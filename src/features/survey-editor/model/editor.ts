@@ -26,6 +26,7 @@ import { doAgain, emptyHistory, type History, remember, takeBack } from './histo
 import { hitTest } from './hit-test'
 import { type PointerInput, reachOf, type ToolPointer, type WheelInput } from './inputs'
 import { Pointers } from './pointers'
+import { placeOfSelection } from './marks'
 import { stillThere } from './selection'
 
 export interface EditorOptions {
@@ -144,7 +145,10 @@ export class Editor {
 
   // — tools, photos, selection —
 
-  readonly select = (selection: Selection): void => this.set({ selection })
+  readonly select = (selection: Selection): void => {
+    this.set({ selection })
+    this.reveal()
+  }
 
   readonly chooseTool = (tool: ToolName): void => {
     if (!this.state.canEdit && tool !== 'select' && tool !== 'pan') return
@@ -175,6 +179,7 @@ export class Editor {
   readonly resize = (viewport: Viewport): void => {
     if (viewport.width === this.state.viewport.width && viewport.height === this.state.viewport.height) return
     this.set({ viewport })
+    this.reveal()
   }
 
   readonly fitPhoto = (): void => this.look(fit(this.picture, this.state.viewport))
@@ -278,6 +283,22 @@ export class Editor {
     const { photoId, viewport, cameras } = this.state
     if (photoId === null) return
     this.set({ cameras: { ...cameras, [photoId]: keepInView(camera, this.picture, viewport) } })
+  }
+
+  /** Moves the photo where the selected mark would be out of sight; a photo shown whole needs no moving. */
+  private reveal(): void {
+    const { survey, photoId, selection, viewport } = this.state
+    if (photoId === null || !this.state.cameras[photoId] || viewport.width === 0) return
+    const at = placeOfSelection(survey, photoId, selection)
+    if (!at) return
+    const { screenX, screenY } = toScreen(this.camera, at)
+    const margin = Math.min(40, viewport.width / 4, viewport.height / 4)
+    const inside =
+      screenX > margin &&
+      screenX < viewport.width - margin &&
+      screenY > margin &&
+      screenY < viewport.height - margin
+    if (!inside) this.look(panBy(this.camera, viewport.width / 2 - screenX, viewport.height / 2 - screenY))
   }
 
   private middle() {

@@ -2,6 +2,7 @@ import { photoDistance, type PhotoPoint } from '@shared/geometry/point'
 import type { Bay } from '@shared/schemas/bay'
 import type { Photo, PostMark } from '@shared/schemas/photo'
 import type { Survey } from '@shared/schemas/survey'
+import type { Selection } from './editor-context'
 
 /** A post's stroke with both ends; a mark without a top stands up by a guess. */
 export interface Stroke {
@@ -71,3 +72,20 @@ export function distanceToLine(at: PhotoPoint, [a, b]: readonly [PhotoPoint, Pho
 /** Posts of the survey that are not marked on this photo yet. */
 export const unplacedPosts = (survey: Survey, photo: Photo | undefined): string[] =>
   survey.posts.flatMap(({ id }) => (photo?.posts[id] ? [] : [id]))
+
+/** The middle of a selected post or bay on a photo; none where it is not marked there. */
+export function placeOfSelection(
+  survey: Survey,
+  photoId: string,
+  selection: Selection,
+): PhotoPoint | undefined {
+  if (selection.kind !== 'post' && selection.kind !== 'bay') return undefined
+  const strokes = strokesOf(survey, photoOf(survey, photoId))
+  if (selection.kind === 'post') {
+    const stroke = strokes.get(selection.id)
+    return stroke && middle(stroke)
+  }
+  const bay = survey.bays.find(({ id }) => id === selection.id)
+  const line = bay && bayLine(bay, strokes)
+  return line && middle({ base: line[0], top: line[1] })
+}

@@ -48,29 +48,30 @@ export function Readings({ view, actions, of, readings, onComplete }: ReadingsPr
   return (
     <div className="flex flex-col gap-3">
       {view.canEdit && (
-        <>
-          <ChoiceGroup
-            label="Where the tape lies"
-            choices={places.map(({ value, label }) => ({
-              value,
-              label: (
-                <span>
-                  {label} <Length value={guard.readAt[value]} format={format} className="text-sm" />
-                </span>
-              ),
-            }))}
-            value={place}
-            onChange={setPlace}
-          />
-          <Keypad
-            entry={entry}
-            onEntry={setEntry}
-            onEnter={add}
-            format={format}
-            fraction={view.fraction}
-            enterLabel={`Add ${place}`}
-          />
-        </>
+        <Keypad
+          entry={entry}
+          onEntry={setEntry}
+          onEnter={add}
+          format={format}
+          fraction={view.fraction}
+          enterLabel={`Add ${place}`}
+          beside={
+            <ChoiceGroup
+              label="Where the tape lies"
+              quiet
+              choices={places.map(({ value, label }) => ({
+                value,
+                label: (
+                  <span>
+                    {label} <Length value={guard.readAt[value]} format={format} className="text-sm" />
+                  </span>
+                ),
+              }))}
+              value={place}
+              onChange={setPlace}
+            />
+          }
+        />
       )}
       {doubts.map((text) => (
         <FindingItem key={text} finding={{ level: 'check', text }} />

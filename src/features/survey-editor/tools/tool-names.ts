@@ -9,5 +9,5 @@ export const toolLabels: Record<ToolName, string> = {
   bay: 'Bay',
   stair: 'Stair',
   rectangle: 'Rectangle',
-  pan: 'Move photo',
+  pan: 'Pan',
 }

@@ -17,13 +17,15 @@ interface KeypadProps {
   fraction: 16 | 32 | 64
   /** What the main key does: `Add top reading`. */
   enterLabel: string
+  /** What stands beside the figure: where the tape lies. */
+  beside?: ReactNode
 }
 
 const key =
   'flex min-h-14 min-w-0 items-center justify-center rounded border border-rule bg-paper text-lg font-medium active:bg-chalk-ground'
 
 /** A length by big keys or by keyboard; what was understood stands above, as large as anything near it. */
-export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel }: KeypadProps) {
+export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, beside }: KeypadProps) {
   const id = useId()
   const isMetric = format.style === 'millimetres'
   const parsed = readEntry(entry, isMetric ? 'mm' : 'in')
@@ -33,8 +35,15 @@ export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel }
   }
   return (
     <div className="flex flex-col gap-2">
-      <div className="min-h-12 text-2xl font-semibold" aria-live="polite">
-        {parsed?.ok ? <Length value={parsed.length} format={format} /> : <span className="text-soft">—</span>}
+      <div className="flex flex-wrap items-center justify-between gap-x-3 gap-y-2">
+        {beside}
+        <div className="ml-auto min-h-10 text-2xl font-semibold" aria-live="polite">
+          {parsed?.ok ? (
+            <Length value={parsed.length} format={format} />
+          ) : (
+            <span className="text-soft">—</span>
+          )}
+        </div>
       </div>
       {parsed && !parsed.ok ? (
         <p id={`${id}-fault`} role="alert" className="text-sm text-stop">
