@@ -1,4 +1,3 @@
-import { useMutation, useQueryClient } from '@tanstack/react-query'
 import {
   BriefcaseBusiness,
   Building2,
@@ -10,14 +9,13 @@ import {
   Wrench,
 } from 'lucide-react'
 import { type ComponentType, useState } from 'react'
-import { Link, NavLink, Outlet, useNavigate } from 'react-router-dom'
-import { accounts } from '@shared/endpoints/accounts'
+import { Link, NavLink, Outlet } from 'react-router-dom'
 import type { Session } from '@shared/schemas/session'
 import { classes } from '@/components/classes'
 import { Menu, MenuItem, MenuLabel, MenuLink } from '@/components/menu'
 import { Brand } from '@/components/taut-line'
 import { sayProblem } from '@/components/toast'
-import { call } from '@/lib/api-client'
+import { useSignOut } from '@/features/session/api/sign-out'
 import { messageOf } from '@/lib/api-error'
 import { applyTheme, readTheme, type Theme } from '@/lib/theme'
 import { OfflineBanner } from './offline-banner'
@@ -101,16 +99,7 @@ const themeNames: Record<Theme, string> = { system: 'as the device', light: 'lig
 
 function AccountMenu({ session }: { session: Session }) {
   const [theme, setTheme] = useState(readTheme)
-  const navigate = useNavigate()
-  const queries = useQueryClient()
-  const signOut = useMutation({
-    mutationFn: () => call(accounts.signOut),
-    onSuccess: async () => {
-      queries.clear()
-      await navigate(paths.signIn)
-    },
-    onError: (error) => sayProblem(messageOf(error)),
-  })
+  const signOut = useSignOut()
   const turnTheme = () => {
     const next = nextTheme[theme]
     applyTheme(next)
@@ -143,7 +132,9 @@ function AccountMenu({ session }: { session: Session }) {
       <MenuItem onSelect={turnTheme}>
         <SunMoon aria-hidden="true" className="size-5" /> Colours: {themeNames[theme]}
       </MenuItem>
-      <MenuItem onSelect={() => signOut.mutate()}>
+      <MenuItem
+        onSelect={() => signOut.mutate(undefined, { onError: (error) => sayProblem(messageOf(error)) })}
+      >
         <LogOut aria-hidden="true" className="size-5" /> Sign out
       </MenuItem>
     </Menu>

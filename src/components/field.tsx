@@ -53,8 +53,8 @@ export function Field({
 }
 
 export const controlClasses =
-  'min-h-12 w-full rounded border border-rule bg-card px-3 py-2 text-base text-ink placeholder:text-soft ' +
-  'aria-invalid:border-stop disabled:opacity-60 read-only:bg-paper'
+  'min-h-12 w-full rounded border border-steel bg-card px-3 py-2 text-base text-ink placeholder:text-soft ' +
+  'aria-invalid:border-stop disabled:opacity-60 [&[readonly]]:bg-paper'
 
 type Frame<Props> = FieldFrame & Omit<Props, 'id' | 'className'>
 

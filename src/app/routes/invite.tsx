@@ -1,30 +1,32 @@
 import { useQuery } from '@tanstack/react-query'
-import { useParams } from 'react-router-dom'
+import { Link, useParams } from 'react-router-dom'
 import { Button } from '@/components/button'
 import { ErrorNote, Loading } from '@/components/states'
+import { acceptInvitation } from '@/features/session/api/accept-invitation'
+import { invitationQuery } from '@/features/session/api/read-invitation'
 import { EntryPage } from '@/features/session/entry-page'
 import { PASSWORD_RULES, PasswordField } from '@/features/session/password-field'
-import { signInAddresses } from '@/features/session/sign-in-addresses'
 import { useEntry } from '@/features/session/use-entry'
-import { call } from '@/lib/api-client'
 import { fieldError, messageOf } from '@/lib/api-error'
+import { paths } from '../paths'
 
 /** A one-time link: whom it is for, and the password they choose. */
 export function Component() {
   const { token = '' } = useParams()
-  const invitation = useQuery({
-    queryKey: ['invitation', token],
-    queryFn: ({ signal }) => call(signInAddresses.readInvitation, { params: { token }, signal }),
-    staleTime: Infinity,
-  })
-  const { submit, error, busy } = useEntry(({ password = '' }) =>
-    call(signInAddresses.acceptInvitation, { params: { token }, body: { password } }),
-  )
+  const invitation = useQuery(invitationQuery(token))
+  const { form, submit, error, busy } = useEntry(acceptInvitation(token))
   if (invitation.isPending) return <Loading what="the invitation" />
   if (invitation.error) {
     return (
       <EntryPage title="One-time link">
-        <ErrorNote message={messageOf(invitation.error)} />
+        <ErrorNote message={messageOf(invitation.error)} onRetry={() => void invitation.refetch()} />
+        <p className="mt-4 text-soft">
+          If you have a password already,{' '}
+          <Link to={paths.signIn} className="inline-block py-3 font-medium text-spruce underline">
+            sign in
+          </Link>
+          .
+        </p>
       </EntryPage>
     )
   }
@@ -34,9 +36,9 @@ export function Component() {
       <p className="mb-4">
         {company} has made you an account. You sign in as <strong>{email}</strong>; choose your password.
       </p>
-      <form onSubmit={submit} className="flex flex-col gap-4">
-        {error ? <ErrorNote message={messageOf(error)} /> : null}
-        <input type="hidden" autoComplete="username" value={email} readOnly />
+      <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
+        {/* For the browser's password keeper, which wants to know whose password this is. */}
+        <input hidden readOnly autoComplete="username" value={email} />
         <PasswordField
           label="Password"
           name="password"
@@ -44,6 +46,7 @@ export function Component() {
           hint={PASSWORD_RULES}
           error={fieldError(error, 'password')}
         />
+        {error ? <ErrorNote message={messageOf(error)} /> : null}
         <Button type="submit" look="primary" busy={busy}>
           Set password and sign in
         </Button>

@@ -4,11 +4,10 @@ import { Button } from '@/components/button'
 import { ChoiceGroup } from '@/components/choices'
 import { TextField } from '@/components/field'
 import { ErrorNote } from '@/components/states'
+import { registerCompany } from '@/features/session/api/register-company'
 import { EntryPage } from '@/features/session/entry-page'
 import { PASSWORD_RULES, PasswordField } from '@/features/session/password-field'
-import { signInAddresses } from '@/features/session/sign-in-addresses'
 import { useEntry } from '@/features/session/use-entry'
-import { call } from '@/lib/api-client'
 import { fieldError, messageOf } from '@/lib/api-error'
 import { paths } from '../paths'
 
@@ -19,16 +18,11 @@ const unitChoices = [
 
 export function Component() {
   const [length, setLength] = useState<'in' | 'mm'>('in')
-  const { submit, error, busy } = useEntry(({ company = '', name = '', email = '', password = '' }) =>
-    call(signInAddresses.registerCompany, {
-      body: { company, name, email, password, units: { length, force: length === 'in' ? 'lbf' : 'N' } },
-    }),
-  )
+  const { form, submit, error, busy } = useEntry(registerCompany(length))
   const of = (path: string) => fieldError(error, path)
   return (
     <EntryPage title="Register your company">
-      <form onSubmit={submit} className="flex flex-col gap-4">
-        {error ? <ErrorNote message={messageOf(error)} /> : null}
+      <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
         <TextField
           label="Company"
           name="company"
@@ -62,6 +56,7 @@ export function Component() {
           error={of('password')}
         />
         <p className="text-sm text-soft">You become the company’s owner and can add everybody else.</p>
+        {error ? <ErrorNote message={messageOf(error)} /> : null}
         <Button type="submit" look="primary" busy={busy}>
           Register
         </Button>

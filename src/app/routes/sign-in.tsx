@@ -2,22 +2,18 @@ import { Link } from 'react-router-dom'
 import { Button } from '@/components/button'
 import { TextField } from '@/components/field'
 import { ErrorNote } from '@/components/states'
+import { signIn } from '@/features/session/api/sign-in'
 import { EntryPage } from '@/features/session/entry-page'
 import { PasswordField } from '@/features/session/password-field'
-import { signInAddresses } from '@/features/session/sign-in-addresses'
 import { useEntry } from '@/features/session/use-entry'
-import { call } from '@/lib/api-client'
 import { fieldError, messageOf } from '@/lib/api-error'
 import { paths } from '../paths'
 
 export function Component() {
-  const { submit, error, busy } = useEntry(({ email = '', password = '' }) =>
-    call(signInAddresses.signIn, { body: { email, password } }),
-  )
+  const { form, submit, error, busy } = useEntry(signIn)
   return (
     <EntryPage title="Sign in">
-      <form onSubmit={submit} className="flex flex-col gap-4">
-        {error ? <ErrorNote message={messageOf(error)} /> : null}
+      <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
         <TextField
           label="E-mail address"
           name="email"
@@ -32,6 +28,7 @@ export function Component() {
           autoComplete="current-password"
           error={fieldError(error, 'password')}
         />
+        {error ? <ErrorNote message={messageOf(error)} /> : null}
         <Button type="submit" look="primary" busy={busy}>
           Sign in
         </Button>

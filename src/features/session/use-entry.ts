@@ -2,11 +2,10 @@ import { useMutation, useQueryClient } from '@tanstack/react-query'
 import type { FormEvent } from 'react'
 import { useNavigate, useSearchParams } from 'react-router-dom'
 import type { Session } from '@shared/schemas/session'
+import { useFirstFault } from '@/components/use-first-fault'
 import { keepToken } from '@/lib/api-client'
+import { safeNext } from './safe-next'
 import { sessionQuery } from './session'
-
-/** Where to go after signing in: what was asked for, so far as it is a page of ours. */
-export const safeNext = (next: string | null): string => (next && /^\/(?![/\\])/.test(next) ? next : '/jobs')
 
 /** A form that ends in a session: sends its fields, keeps the session, goes on. */
 export function useEntry(send: (fields: Record<string, string>) => Promise<Session>) {
@@ -22,10 +21,11 @@ export function useEntry(send: (fields: Record<string, string>) => Promise<Sessi
       await navigate(safeNext(search.get('next')), { replace: true })
     },
   })
+  const form = useFirstFault(entry.error)
   const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const fields = Object.fromEntries(new FormData(event.currentTarget)) as Record<string, string>
     entry.mutate(fields)
   }
-  return { submit, error: entry.error, busy: entry.isPending }
+  return { form, submit, error: entry.error, busy: entry.isPending }
 }
