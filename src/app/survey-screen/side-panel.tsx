@@ -1,16 +1,21 @@
 import { ChevronDown, ChevronUp } from 'lucide-react'
 import { useState } from 'react'
+import { nextGap } from '@shared/survey/find-gaps'
 import { IconButton } from '@/components/button'
 import { classes } from '@/components/classes'
 import { RectangleForm } from '@/features/survey-editor/chrome/rectangle-form'
+import type { Selection } from '@/features/survey-editor/model/editor-context'
 import type { EditorState } from '@/features/survey-editor/model/editor-state'
-import { nextGap } from '@shared/survey/find-gaps'
 import { photoOf } from '@/features/survey-editor/model/marks'
 import { selectionOfGap } from '@/features/survey-editor/model/selection'
 import { NextMissing } from '@/features/survey-editor/panels/next-missing'
 import { SelectionPanel } from '@/features/survey-editor/panels/selection-panel'
+import type { ToolName } from '@/features/survey-editor/tools/tool-names'
 import { lengthFormat } from '../length-format'
 import type { SurveySession } from '../survey-session'
+
+/** Tools that go from mark to mark. */
+const tracing: ReadonlySet<ToolName> = new Set(['post', 'bay', 'stair'])
 
 interface SidePanelProps {
   session: SurveySession
@@ -21,10 +26,16 @@ interface SidePanelProps {
 /** What is selected, and what is missing: beside the photo on a desk, a sheet below it on a phone. */
 export function SidePanel({ session, state, onCutList }: SidePanelProps) {
   const { view, actions, editor } = session
-  const [low, setLow] = useState(false)
+  const [choice, setChoice] = useState<{ tool: ToolName; low: boolean } | null>(null)
+  // While posts and bays are traced the photo keeps its room; what is chosen by hand holds until another tool is taken.
+  const low = choice?.tool === state.tool ? choice.low : tracing.has(state.tool)
+  const handle = (selection: Selection) => {
+    editor.chooseTool('select')
+    actions.select(selection)
+  }
   const next = () => {
     const gap = nextGap(editor.getSnapshot().survey)
-    actions.select(gap ? selectionOfGap(gap) : { kind: 'none' })
+    handle(gap ? selectionOfGap(gap) : { kind: 'none' })
   }
   const { selection } = view
   const photo = photoOf(view.survey, state.photoId)
@@ -41,13 +52,13 @@ export function SidePanel({ session, state, onCutList }: SidePanelProps) {
     >
       <div className="flex items-center border-b border-rule">
         <div className="min-w-0 flex-1">
-          <NextMissing view={view} actions={actions} onCutList={onCutList} />
+          <NextMissing view={view} actions={{ ...actions, select: handle }} onCutList={onCutList} />
         </div>
         {isOpen && (
           <IconButton
             className="md:hidden"
             label={low ? 'Raise the panel' : 'Lower the panel'}
-            onClick={() => setLow(!low)}
+            onClick={() => setChoice({ tool: state.tool, low: !low })}
           >
             {low ? <ChevronUp aria-hidden="true" /> : <ChevronDown aria-hidden="true" />}
           </IconButton>
