@@ -12,7 +12,15 @@ export function Component() {
   const navigate = useNavigate()
   const may = useMay('job:create')
   return (
-    <Page title="New job" width="narrow" above={<Link to={paths.jobs}>Jobs</Link>}>
+    <Page
+      title="New job"
+      width="narrow"
+      above={
+        <Link to={paths.jobs} className="inline-block py-1 font-medium text-spruce underline">
+          Jobs
+        </Link>
+      }
+    >
       {may ? (
         <JobForm people={people.data ?? []} onSaved={({ id }) => void navigate(paths.job(id))} />
       ) : (

@@ -13,10 +13,3 @@ export function dueWords(due: string, today: Date): string {
   if (days === 0) return 'due today'
   return days < 0 ? `${count(-days)} late` : `due in ${count(days)}`
 }
-
-export const dateText = (date: string): string =>
-  new Date(date.length === 10 ? `${date}T12:00:00` : date).toLocaleDateString(undefined, {
-    day: 'numeric',
-    month: 'short',
-    year: 'numeric',
-  })

@@ -1,27 +1,32 @@
 import type { Person } from '@shared/schemas/person'
 import { stages } from '@shared/schemas/job'
 import { SelectField, TextField } from '@/components/field'
+import type { JobView } from './job-address'
 
 interface JobFiltersProps {
-  values: { search: string; stage: string; personId: string; sort: string }
+  view: JobView
   people: readonly Person[]
-  onChange: (name: 'search' | 'stage' | 'personId' | 'sort', value: string) => void
+  onChange: (name: keyof JobView, value: string) => void
 }
 
-export function JobFilters({ values, people, onChange }: JobFiltersProps) {
+export function JobFilters({ view, people, onChange }: JobFiltersProps) {
   return (
-    <div role="search" className="mb-4 grid grid-cols-2 gap-3 md:grid-cols-[2fr_1fr_1fr_1fr]">
+    <div
+      role="search"
+      aria-label="Jobs"
+      className="mb-4 grid grid-cols-3 gap-x-2 gap-y-3 md:grid-cols-[2fr_1fr_1fr_1fr]"
+    >
       <TextField
-        className="col-span-2 md:col-span-1"
+        className="col-span-3 md:col-span-1"
         label="Search number, title, customer, site"
         type="search"
-        value={values.search}
+        value={view.search}
         maxLength={120}
         onChange={(event) => onChange('search', event.target.value)}
       />
       <SelectField
         label="Stage"
-        value={values.stage}
+        value={view.stage}
         onChange={(event) => onChange('stage', event.target.value)}
       >
         <option value="">all</option>
@@ -29,11 +34,7 @@ export function JobFilters({ values, people, onChange }: JobFiltersProps) {
           <option key={stage}>{stage}</option>
         ))}
       </SelectField>
-      <SelectField
-        label="With"
-        value={values.personId}
-        onChange={(event) => onChange('personId', event.target.value)}
-      >
+      <SelectField label="With" value={view.with} onChange={(event) => onChange('with', event.target.value)}>
         <option value="">anybody</option>
         {people.map(({ id, name }) => (
           <option key={id} value={id}>
@@ -42,12 +43,11 @@ export function JobFilters({ values, people, onChange }: JobFiltersProps) {
         ))}
       </SelectField>
       <SelectField
-        className="col-span-2 md:col-span-1"
         label="Sort by"
-        value={values.sort}
+        value={view.sort}
         onChange={(event) => onChange('sort', event.target.value)}
       >
-        <option value="updated">last change</option>
+        <option value="updated">change</option>
         <option value="due">due date</option>
         <option value="number">number</option>
       </SelectField>

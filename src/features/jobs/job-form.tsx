@@ -4,8 +4,10 @@ import type { Person } from '@shared/schemas/person'
 import { Button } from '@/components/button'
 import { SelectField, TextArea, TextField } from '@/components/field'
 import { ErrorNote } from '@/components/states'
+import { useFirstFault } from '@/components/use-first-fault'
 import { fieldError, messageOf } from '@/lib/api-error'
 import { type JobFields, useSaveJob } from './api/save-job'
+import { peopleToChoose } from './people-to-choose'
 
 interface JobFormProps {
   /** The job to change; none opens a new one. */
@@ -30,14 +32,14 @@ const fieldsOf = (form: FormData): JobFields => ({
 
 export function JobForm({ job, people, onSaved }: JobFormProps) {
   const save = useSaveJob(job?.id, onSaved)
+  const form = useFirstFault(save.error)
   const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     save.mutate(fieldsOf(new FormData(event.currentTarget)))
   }
   const of = (path: string) => fieldError(save.error, path)
   return (
-    <form onSubmit={submit} className="flex flex-col gap-4">
-      {save.error ? <ErrorNote message={messageOf(save.error)} /> : null}
+    <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
       <TextField
         label="Title"
         name="title"
@@ -58,15 +60,14 @@ export function JobForm({ job, people, onSaved }: JobFormProps) {
       <TextField label="Due" name="due" type="date" defaultValue={job?.due ?? ''} error={of('due')} />
       <SelectField label="With" name="personId" defaultValue={job?.personId ?? ''} error={of('personId')}>
         <option value="">nobody yet</option>
-        {people
-          .filter(({ state }) => state !== 'disabled')
-          .map(({ id, name }) => (
-            <option key={id} value={id}>
-              {name}
-            </option>
-          ))}
+        {peopleToChoose(people, job).map(({ id, name }) => (
+          <option key={id} value={id}>
+            {name}
+          </option>
+        ))}
       </SelectField>
       <TextArea label="Notes" name="notes" maxLength={4000} defaultValue={job?.notes} error={of('notes')} />
+      {save.error ? <ErrorNote message={messageOf(save.error)} /> : null}
       <Button type="submit" look="primary" busy={save.isPending}>
         {job ? 'Save' : 'Open the job'}
       </Button>

@@ -1,24 +1,11 @@
 import type { Job } from '@shared/schemas/job'
 import { Link } from 'react-router-dom'
-import { classes } from '@/components/classes'
 import { type Column, Table } from '@/components/table'
-import { dateText, daysUntil, dueWords } from './due'
+import { Due } from './due-date'
 
 interface JobListProps {
   jobs: readonly Job[]
   pathOf: (jobId: string) => string
-}
-
-/** A finished job's date is no longer waited for. */
-function Due({ job: { due, stage } }: { job: Job }) {
-  if (!due) return null
-  if (stage === 'done' || stage === 'lost') return <span className="whitespace-nowrap">{dateText(due)}</span>
-  const today = new Date()
-  return (
-    <span className={classes('whitespace-nowrap', daysUntil(due, today) < 0 && 'font-medium text-marker')}>
-      {dateText(due)} <span className="text-sm">({dueWords(due, today)})</span>
-    </span>
-  )
 }
 
 /** Jobs as cards on a phone and as a dense table on a desk. */

@@ -1,20 +1,23 @@
 import { infiniteQueryOptions, keepPreviousData } from '@tanstack/react-query'
 import { jobs } from '@shared/endpoints/jobs'
-import type { Stage } from '@shared/schemas/job'
 import { call } from '@/lib/api-client'
+import type { JobView } from '../job-address'
 
-export interface JobFilter {
-  search?: string
-  stage?: Stage
-  personId?: string
-  sort?: 'updated' | 'due' | 'number'
-}
-
-export const jobsQuery = (filter: JobFilter) =>
+/** Jobs as a view of the list asks for them, a page at a time. */
+export const jobsQuery = (view: JobView) =>
   infiniteQueryOptions({
-    queryKey: ['jobs', 'list', filter],
-    queryFn: ({ pageParam, signal }) =>
-      call(jobs.listJobs, { query: { ...filter, ...(pageParam ? { after: pageParam } : {}) }, signal }),
+    queryKey: ['jobs', 'list', view],
+    queryFn: ({ pageParam, signal }) => {
+      const { search, stage, sort } = view
+      const asked = {
+        sort,
+        ...(search.trim() ? { search: search.trim() } : {}),
+        ...(stage ? { stage } : {}),
+        ...(view.with ? { personId: view.with } : {}),
+        ...(pageParam ? { after: pageParam } : {}),
+      }
+      return call(jobs.listJobs, { query: asked, signal })
+    },
     initialPageParam: null as string | null,
     getNextPageParam: ({ next }) => next,
     placeholderData: keepPreviousData,

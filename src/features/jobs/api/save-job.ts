@@ -1,6 +1,6 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query'
 import { jobs } from '@shared/endpoints/jobs'
-import type { Job, Stage } from '@shared/schemas/job'
+import type { Job } from '@shared/schemas/job'
 import { call } from '@/lib/api-client'
 
 /** What the form of a job holds. */
@@ -25,14 +25,5 @@ export function useSaveJob(jobId: string | undefined, onSaved: (job: Job) => voi
       await queries.invalidateQueries({ queryKey: ['jobs'] })
       onSaved(job)
     },
-  })
-}
-
-/** Moves a job to another stage. */
-export function useMoveJob(jobId: string) {
-  const queries = useQueryClient()
-  return useMutation({
-    mutationFn: (stage: Stage) => call(jobs.moveJob, { params: { jobId }, body: { stage } }),
-    onSuccess: () => queries.invalidateQueries({ queryKey: ['jobs'] }),
   })
 }
