@@ -7,6 +7,8 @@ import { ErrorNote, Loading } from '@/components/states'
 import { AddPerson } from '@/features/people/add-person'
 import { peopleQuery } from '@/features/people/api/list-people'
 import { PersonCard } from '@/features/people/person-card'
+import { PersonControls } from '@/features/people/person-controls'
+import { RoleList } from '@/features/people/role-list'
 import { useMay, useSession } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
 
@@ -28,12 +30,24 @@ export function Component() {
     >
       {isPending ? <Loading what="the people" /> : null}
       {error ? <ErrorNote message={messageOf(error)} onRetry={() => void refetch()} /> : null}
-      {mayManage ? null : <p className="mb-4 text-soft">An owner adds people and gives roles.</p>}
-      <ul className="grid gap-3 md:grid-cols-2">
-        {people?.map((person) => (
-          <PersonCard key={person.id} person={person} mayManage={mayManage} isSelf={person.id === self.id} />
-        ))}
-      </ul>
+      {mayManage ? null : (
+        <p className="mb-4 text-soft">An owner of your company adds people and gives roles.</p>
+      )}
+      {people ? (
+        <ul className="grid items-start gap-3 md:grid-cols-2">
+          {people.map((person) => (
+            <PersonCard key={person.id} person={person} isSelf={person.id === self.id}>
+              {mayManage ? <PersonControls person={person} isSelf={person.id === self.id} /> : null}
+            </PersonCard>
+          ))}
+        </ul>
+      ) : null}
+      {mayManage && people?.length === 1 ? (
+        <p className="mt-4 text-soft">
+          You are the first. Add whoever measures, prices, cuts and fits; each gets a one-time link.
+        </p>
+      ) : null}
+      <RoleList />
       <Sheet open={adding} onOpenChange={setAdding} title="Add a person">
         <AddPerson />
       </Sheet>
