@@ -11,7 +11,7 @@ export default function Toasts() {
           color: 'var(--ink)',
           border: '1px solid var(--rule)',
           borderRadius: 6,
-          fontFamily: 'inherit',
+          fontFamily: 'Barlow, system-ui, sans-serif',
           fontSize: 16,
         },
       }}

@@ -1,6 +1,5 @@
 import { useState } from 'react'
 import { Link, useParams } from 'react-router-dom'
-import { proposeRunsOf } from '../propose-runs-of'
 import { Button, ButtonLink } from '@/components/button'
 import { Page } from '@/components/page'
 import { Sheet } from '@/components/sheet'
@@ -66,7 +65,7 @@ function SurveyTable({ loaded }: { loaded: Loaded }) {
       }
     >
       <div className="flex flex-col gap-6">
-        {canEdit ? <AddRows {...panel} runsFor={proposeRunsOf(loaded)} /> : null}
+        {canEdit ? <AddRows {...panel} /> : null}
         <Section title="Posts">
           <PostsTable
             {...panel}

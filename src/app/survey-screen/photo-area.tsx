@@ -63,6 +63,7 @@ export function PhotoArea({ session, state, children }: PhotoAreaProps) {
       </div>
       <p
         aria-live="polite"
+        hidden={state.tool === 'select' && state.selection.kind !== 'none' && state.draft === null}
         className="pointer-events-none absolute bottom-2 left-1/2 max-w-[92%] -translate-x-1/2 rounded bg-card/95 px-3 py-1 text-center text-sm"
       >
         {state.hint}

@@ -17,6 +17,14 @@ export interface Captions {
   posts: ReadonlyMap<string, FindingLevel>
 }
 
+const missing: ReadonlySet<string> = new Set([
+  'missing-reading',
+  'missing-material',
+  'missing-angle',
+  'missing-size',
+  'missing-cover',
+])
+
 const weight: Record<FindingLevel, number> = { note: 0, check: 1, stop: 2 }
 const graver = (a: FindingLevel | null | undefined, b: FindingLevel): FindingLevel =>
   a && weight[a] >= weight[b] ? a : b
@@ -25,7 +33,9 @@ const graver = (a: FindingLevel | null | undefined, b: FindingLevel): FindingLev
 export function captionsOf(survey: Survey, findings: readonly Finding[], format: LengthFormat): Captions {
   const ofBays = new Map<string, FindingLevel>()
   const posts = new Map<string, FindingLevel>()
-  for (const { level, where } of findings) {
+  for (const { level, where, code } of findings) {
+    // What is only missing yet shows as a dashed line or in *next missing*; a shape is for what is wrong.
+    if (missing.has(code)) continue
     if (where.bay) ofBays.set(where.bay, graver(ofBays.get(where.bay), level))
     else if (where.post) posts.set(where.post, graver(posts.get(where.post), level))
   }

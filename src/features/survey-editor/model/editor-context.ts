@@ -26,6 +26,8 @@ export interface EditorView {
 export interface EditorActions {
   /** One gesture: applied at once, undone in one step. */
   perform: (operation: SurveyOperation) => void
+  /** The same, with runs laid anew for what it changes, as one gesture. */
+  performAndLay: (operation: SurveyOperation) => void
   select: (selection: Selection) => void
   undo: () => void
   redo: () => void

@@ -5,6 +5,7 @@ import { invertOperation } from '@shared/survey/invert-operation'
 import { OperationRefused } from '@shared/survey/operation-refused'
 import type { SurveyOperation } from '@shared/survey/survey-operation'
 import { makeTools } from '../tools/all-tools'
+import { oneGesture } from '../tools/one-gesture'
 import type { ToolHost, ToolMachine } from '../tools/tool'
 import type { ToolName } from '../tools/tool-names'
 import {
@@ -112,6 +113,14 @@ export class Editor {
   readonly perform = (operation: SurveyOperation): void => {
     const opposite = this.apply(operation)
     if (opposite) this.remembered(remember(this.history, opposite))
+  }
+
+  /** A change and the runs it asks for, as the house would lay them, in one gesture. */
+  readonly performAndLay = (operation: SurveyOperation): void => {
+    const { survey } = this.state
+    // A change that does not fit is refused in the ordinary way.
+    if (!fits(survey, operation)) return this.perform(operation)
+    this.perform(oneGesture([operation, ...this.options.runsFor(applyOperation(survey, operation))]))
   }
 
   readonly undo = (): void => {
@@ -322,12 +331,22 @@ export class Editor {
       showLoupe: (loupe) => this.set({ loupe }),
       panBy: (dx, dy) => this.look(panBy(this.camera, dx, dy)),
       setPlacing: (placing) => this.set({ placing }),
-      runsFor: this.options.runsFor,
+      performAndLay: this.performAndLay,
     }
   }
 
   private set(changes: Partial<EditorState>): void {
     this.state = { ...this.state, ...changes, hint: this.active?.hint ?? '' }
     for (const listener of this.listeners) listener()
+  }
+}
+
+function fits(survey: Survey, operation: SurveyOperation): boolean {
+  try {
+    applyOperation(survey, operation)
+    return true
+  } catch (error) {
+    if (error instanceof OperationRefused) return false
+    throw error
   }
 }

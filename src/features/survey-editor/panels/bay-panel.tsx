@@ -47,7 +47,7 @@ export function BayPanel({ view, actions, bay, onNext }: PanelProps & { bay: Bay
         choices={kinds}
         value={bay.kind}
         disabled={!canEdit}
-        onChange={(kind) => set({ kind })}
+        onChange={(kind) => actions.performAndLay({ type: 'bay.set', id: bay.id, set: { kind }, unset: [] })}
       />
       {bay.kind === 'stair' ? <StairFields view={view} actions={actions} bay={bay} /> : null}
       <div className="grid grid-cols-3 gap-3">

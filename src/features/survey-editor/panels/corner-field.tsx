@@ -8,9 +8,9 @@ export function CornerField({ view, actions, post }: PanelProps & { post: string
   if (meeting.length < 2) return null
   const known = corners.find((corner) => corner.post === post)
   const keep = (text: string, number: number) => {
-    if (text === '' && known) actions.perform({ type: 'corner.remove', post })
+    if (text === '' && known) actions.performAndLay({ type: 'corner.remove', post })
     else if (number > 0 && number <= 180 && number !== known?.angle) {
-      actions.perform({ type: 'corner.set', corner: { post, angle: number } })
+      actions.performAndLay({ type: 'corner.set', corner: { post, angle: number } })
     }
   }
   return (

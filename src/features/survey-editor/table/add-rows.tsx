@@ -1,22 +1,14 @@
 import { useState } from 'react'
-import type { Survey } from '@shared/schemas/survey'
-import { applyOperation } from '@shared/survey/apply-operation'
 import { newBay } from '@shared/survey/new-bay'
 import { nextId } from '@shared/survey/next-id'
-import type { SurveyOperation } from '@shared/survey/survey-operation'
 import { Button } from '@/components/button'
 import { SelectField } from '@/components/field'
 import type { PanelProps } from '../panels/selection-panel'
-import { oneGesture } from '../tools/one-gesture'
 
 const idsOf = (list: readonly { id: string }[]): string[] => list.map(({ id }) => id)
 
 /** Adds posts and bays by name, so that a survey can be made without a photo. */
-export function AddRows({
-  view,
-  actions,
-  runsFor,
-}: PanelProps & { runsFor: (survey: Survey) => SurveyOperation[] }) {
+export function AddRows({ view, actions }: PanelProps) {
   const { survey } = view
   const last = survey.posts.at(-1)?.id ?? ''
   const before = survey.posts.at(-2)?.id ?? ''
@@ -28,11 +20,8 @@ export function AddRows({
   )
   const ready = start !== '' && end !== '' && start !== end && !joined
   const addBay = () => {
-    const add = {
-      type: 'bay.add',
-      bay: newBay({ id: nextId(idsOf(survey.bays), 'B'), from: start, to: end }),
-    } as const
-    actions.perform(oneGesture([add, ...runsFor(applyOperation(survey, add))]))
+    const bay = newBay({ id: nextId(idsOf(survey.bays), 'B'), from: start, to: end })
+    actions.performAndLay({ type: 'bay.add', bay })
     setFrom(undefined)
     setTo(undefined)
   }

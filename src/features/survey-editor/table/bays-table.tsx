@@ -113,7 +113,14 @@ export function BaysTable({ view, actions, onPaste }: BaysTableProps) {
               value={bay.kind}
               choices={kinds}
               disabled={!canEdit}
-              onChange={(value) => set(bay.id, 'kind', value)}
+              onChange={(value) =>
+                actions.performAndLay({
+                  type: 'bay.set',
+                  id: bay.id,
+                  set: { kind: value === 'stair' ? 'stair' : 'level' },
+                  unset: [],
+                })
+              }
             />
           </td>
           {bay.kind === 'stair' ? (

@@ -11,8 +11,8 @@ export function CornersTable({ view, actions }: PanelProps) {
   )
   if (meeting.length === 0) return <p className="text-soft">No bays meet at a post yet.</p>
   const set = (post: string, angle: number | undefined, known: boolean) => {
-    if (angle !== undefined) actions.perform({ type: 'corner.set', corner: { post, angle } })
-    else if (known) actions.perform({ type: 'corner.remove', post })
+    if (angle !== undefined) actions.performAndLay({ type: 'corner.set', corner: { post, angle } })
+    else if (known) actions.performAndLay({ type: 'corner.remove', post })
   }
   return (
     <Sheetlike caption="Corners" headers={['Post', 'Angle between its bays, °']}>

@@ -1,5 +1,4 @@
 import type { PhotoPoint } from '@shared/geometry/point'
-import type { Survey } from '@shared/schemas/survey'
 import type { SurveyOperation } from '@shared/survey/survey-operation'
 import type { Selection } from '../model/editor-context'
 import type { Draft, EditorState } from '../model/editor-state'
@@ -18,8 +17,8 @@ export interface ToolHost {
   showLoupe: (at: PhotoPoint | null) => void
   panBy: (dx: number, dy: number) => void
   setPlacing: (post: string | null) => void
-  /** Runs for bays that have none yet, as the house would lay them. */
-  runsFor: (survey: Survey) => SurveyOperation[]
+  /** The same, with the runs it asks for. */
+  performAndLay: (operation: SurveyOperation) => void
 }
 
 /** One state of a tool: what it does with the hand, and the step it goes to next, if any. */

@@ -1,8 +1,6 @@
-import { applyOperation } from '@shared/survey/apply-operation'
 import { newBay } from '@shared/survey/new-bay'
 import { nextId } from '@shared/survey/next-id'
 import type { ToolHost } from '../tool'
-import { oneGesture } from '../one-gesture'
 
 /** Joins two posts by a bay and lays runs for it, in one change; two posts that are joined already select their bay. */
 export function joinBay(host: ToolHost, from: string, to: string): void {
@@ -22,7 +20,6 @@ export function joinBay(host: ToolHost, from: string, to: string): void {
     from,
     to,
   })
-  const add = { type: 'bay.add', bay } as const
-  host.perform(oneGesture([add, ...host.runsFor(applyOperation(survey, add))]))
+  host.performAndLay({ type: 'bay.add', bay })
   host.select({ kind: 'bay', id: bay.id })
 }

@@ -1,5 +1,3 @@
-import { applyOperation } from '@shared/survey/apply-operation'
-import { oneGesture } from '../one-gesture'
 import { makeMachine, type ToolHost, type ToolMachine, type ToolState } from '../tool'
 
 type MarkStairStep = { to: 'idle' } | { to: 'pointing'; bay: string }
@@ -27,9 +25,7 @@ function changeKind(host: ToolHost, id: string): void {
   const bay = survey.bays.find((known) => known.id === id)
   if (!bay) return
   const kind = bay.kind === 'stair' ? 'level' : 'stair'
-  const change = { type: 'bay.set', id, set: { kind }, unset: [] } as const
-  const operation = { ...change, unset: [...change.unset] }
-  host.perform(oneGesture([operation, ...host.runsFor(applyOperation(survey, operation))]))
+  host.performAndLay({ type: 'bay.set', id, set: { kind }, unset: [] })
   host.select({ kind: 'bay', id })
 }
 
