@@ -2,9 +2,10 @@ import { lazy, Suspense, useEffect, useState, useSyncExternalStore } from 'react
 import { useNavigate, useSearchParams } from 'react-router-dom'
 import { Sheet } from '@/components/sheet'
 import { Loading } from '@/components/states'
-import { sayProblem } from '@/components/toast'
+import { sayDone, sayProblem } from '@/components/toast'
 import { EditorBar } from '@/features/survey-editor/chrome/editor-bar'
 import { KeysList } from '@/features/survey-editor/chrome/keys-list'
+import { useKeys } from '@/features/survey-editor/chrome/use-keys'
 import { ToolRail } from '@/features/survey-editor/chrome/tool-rail'
 import { SurveyPanel } from '@/features/survey-editor/panels/survey-panel'
 import { pictureAddress } from '@/features/surveys/api/add-photo'
@@ -30,6 +31,7 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
   const [sheet, setSheet] = useState<'settings' | 'keys' | null>(null)
   const captions = useCaptions(view)
   const toCutList = useCutList(session)
+  useKeys(editor)
   useWakeLock()
   useOpenAt(session)
   useQuestionMark(() => setSheet('keys'))
@@ -49,6 +51,9 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
         onCutList={toCutList}
         onSettings={() => setSheet('settings')}
         onKeys={() => setSheet('keys')}
+        onRemovePhoto={
+          view.canEdit && state.photoId !== null ? () => removePhoto(session, state.photoId) : null
+        }
       />
       <OfflineBanner />
       <div className="flex min-h-0 flex-1 flex-col-reverse md:flex-row">
@@ -75,6 +80,13 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
       </Sheet>
     </div>
   )
+}
+
+/** Takes a photo with its marks out of the survey; the posts stay. */
+function removePhoto({ editor, actions }: SurveySession, photoId: string | null): void {
+  if (photoId === null) return
+  editor.perform({ type: 'photo.remove', id: photoId })
+  sayDone(`Photo ${photoId} removed, with its marks; the posts stay.`, actions.undo)
 }
 
 /** Goes to the cut list once what was changed has reached the server, so that the list is of this survey. */

@@ -1,6 +1,5 @@
 import { useEffect, useRef } from 'react'
 import type { Captions } from '../model/captions'
-import { commandFor } from '../model/commands'
 import type { Editor } from '../model/editor'
 import { listenToHand } from './hand'
 import { Scene } from './scene'
@@ -64,12 +63,6 @@ export default function PhotoCanvas({ editor, captions, picture, onPictureFailed
       tabIndex={0}
       aria-label="Photo with posts and bays. Press question mark for the keys; the table holds the same survey."
       className="absolute inset-0 touch-none overflow-hidden bg-steel/20 select-none"
-      onKeyDown={(event) => {
-        const command = commandFor(event)
-        if (!command?.when(editor)) return
-        event.preventDefault()
-        command.perform(editor)
-      }}
     />
   )
 }

@@ -3,6 +3,7 @@ import {
   CircleHelp,
   ClipboardList,
   EllipsisVertical,
+  ImageOff,
   History,
   Redo2,
   Settings2,
@@ -24,6 +25,8 @@ interface EditorBarProps {
   onCutList: () => void
   onSettings: () => void
   onKeys: () => void
+  /** None where there is no photo, or for somebody who may only look. */
+  onRemovePhoto: (() => void) | null
 }
 
 /** The bar above the photo: where one is, how far it is saved, and what is not a tool. */
@@ -37,6 +40,7 @@ export function EditorBar({
   onCutList,
   onSettings,
   onKeys,
+  onRemovePhoto,
 }: EditorBarProps) {
   return (
     <header className="flex items-center gap-1 border-b border-rule bg-card px-1">
@@ -72,6 +76,11 @@ export function EditorBar({
         <MenuItem onSelect={onSettings}>
           <Settings2 aria-hidden="true" className="size-5" /> Guard and units
         </MenuItem>
+        {onRemovePhoto ? (
+          <MenuItem onSelect={onRemovePhoto}>
+            <ImageOff aria-hidden="true" className="size-5" /> Remove this photo
+          </MenuItem>
+        ) : null}
         <MenuItem onSelect={onKeys}>
           <CircleHelp aria-hidden="true" className="size-5" /> Keys
         </MenuItem>

@@ -85,6 +85,9 @@ export function Readings({ view, actions, of, readings, onComplete }: ReadingsPr
   )
 }
 
+const dayText = (on: string): string =>
+  new Date(on).toLocaleDateString(undefined, { day: 'numeric', month: 'short' })
+
 const reasons = ['digits swapped', 'wrong bay', 'tape sagged', 'misread'] as const
 
 function ReadingLine({ view, actions, of, reading }: PanelProps & { of: ReadingOwner; reading: Reading }) {
@@ -94,7 +97,7 @@ function ReadingLine({ view, actions, of, reading }: PanelProps & { of: ReadingO
     actions.perform({ type: 'reading.strike', of, id: reading.id, reason: text })
     setStriking(false)
   }
-  const { struck, at, value, by } = reading
+  const { struck, at, value, by, on } = reading
   return (
     <li className="py-2">
       <div className="flex flex-wrap items-center gap-x-3">
@@ -105,7 +108,9 @@ function ReadingLine({ view, actions, of, reading }: PanelProps & { of: ReadingO
           look={struck === undefined ? 'measured' : 'struck'}
           className="text-lg"
         />
-        <span className="min-w-0 flex-1 truncate text-sm text-soft">{struck ?? by}</span>
+        <span className="min-w-0 flex-1 truncate text-sm text-soft">
+          {struck ?? [by, on && dayText(on)].filter(Boolean).join(', ')}
+        </span>
         {struck === undefined && view.canEdit && (
           <Button look="quiet" aria-expanded={striking} onClick={() => setStriking(!striking)}>
             Strike
