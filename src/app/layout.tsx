@@ -3,7 +3,7 @@ import { lazy, Suspense } from 'react'
 import { Navigate, Outlet, ScrollRestoration, useLocation, useMatches } from 'react-router-dom'
 import { Button } from '@/components/button'
 import { ErrorNote, Loading } from '@/components/states'
-import { sessionQuery } from '@/features/session/session'
+import { SessionContext, sessionQuery } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
 import { paths } from './paths'
 
@@ -14,9 +14,6 @@ export function RootLayout() {
   return (
     <>
       <Outlet />
-      <Suspense>
-        <Toasts />
-      </Suspense>
       <ScrollRestoration />
     </>
   )
@@ -45,8 +42,14 @@ export function SignedInLayout() {
     return <Navigate to={`${paths.signIn}?next=${encodeURIComponent(next)}`} replace />
   }
   return (
-    <Suspense fallback={<Loading what="the page" />}>
-      {fullBleed ? <Outlet /> : <Frame session={session} />}
-    </Suspense>
+    <SessionContext value={session}>
+      <Suspense fallback={<Loading what="the page" />}>
+        {fullBleed ? <Outlet /> : <Frame session={session} />}
+      </Suspense>
+      {/* Here and not around the sign-in page, which says everything at its fields and stays light. */}
+      <Suspense>
+        <Toasts />
+      </Suspense>
+    </SessionContext>
   )
 }

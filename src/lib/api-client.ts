@@ -1,7 +1,7 @@
 import type { z } from 'zod'
 import type { Endpoint } from '@shared/endpoints/endpoint'
 import type { Problem } from '@shared/schemas/problem'
-import { ApiError, offline } from './api-error'
+import { ApiError, offline, unreadable } from './api-error'
 
 type Input<Schema> = Schema extends z.ZodType ? z.input<Schema> : undefined
 type Output<Schema> = Schema extends z.ZodType ? z.output<Schema> : undefined
@@ -22,7 +22,7 @@ export const keepToken = (csrfToken: string): void => {
 
 /**
  * Calls an endpoint and answers what it answers. The server has checked both ways; here the description gives types.
- * @throws ApiError with the server's code and sentence, or `offline`.
+ * @throws ApiError with the server's code and sentence, `offline`, or `unreadable` when something else answered.
  */
 export async function call<
   Params extends z.ZodType,
@@ -35,7 +35,7 @@ export async function call<
 ): Promise<Output<Answer>> {
   const url = fillIn(path, sent.params) + search(sent.query)
   const answer = await send(url, { method, body: sent.body, signal: sent.signal })
-  return (answer.status === 204 ? undefined : await answer.json()) as Output<Answer>
+  return (answer.status === 204 ? undefined : await readBody(answer, sent.signal)) as Output<Answer>
 }
 
 interface Request {
@@ -48,13 +48,13 @@ async function send(url: string, request: Request, again = true): Promise<Respon
   if (request.method !== 'GET' && token === undefined) await fetchToken()
   const answer = await reach(url, request)
   if (answer.ok) return answer
-  const problem = await readProblem(answer)
+  const refusal = await readRefusal(answer)
   // The session has begun anew since this page was opened: fetch its token and try once more.
-  if (problem.code === 'stale-page' && again) {
+  if (refusal.code === 'stale-page' && again) {
     await fetchToken()
     return send(url, request, false)
   }
-  throw new ApiError(problem.code, answer.status, problem.detail, problem.fields)
+  throw refusal
 }
 
 async function reach(url: string, { method, body, signal }: Request): Promise<Response> {
@@ -84,18 +84,32 @@ export async function csrfHeader(): Promise<[name: string, value: string]> {
 
 async function fetchToken(): Promise<void> {
   const answer = await reach('/api/session', { method: 'GET' })
-  const { csrfToken } = (await answer.json()) as { csrfToken: string }
+  if (!answer.ok) throw await readRefusal(answer)
+  const { csrfToken } = (await readBody(answer)) as { csrfToken: string }
   keepToken(csrfToken)
 }
 
-async function readProblem(answer: Response): Promise<Pick<Problem, 'code' | 'detail' | 'fields'>> {
+/** The JSON of an answer. A public network's own sign-in page answers 200 with HTML; a signal may be lost half-way. */
+async function readBody(answer: Response, signal?: AbortSignal): Promise<unknown> {
   try {
-    return (await answer.json()) as Problem
+    return await answer.json()
+  } catch (error) {
+    if (signal?.aborted) throw error
+    throw error instanceof SyntaxError ? unreadable() : offline()
+  }
+}
+
+/**
+ * The server's refusal. What stands between may refuse in its place, and must not pass for it: what waits to be sent is
+ * given up when the server says no, but kept when something else does.
+ */
+async function readRefusal(answer: Response): Promise<ApiError> {
+  try {
+    const { code, detail, fields } = ((await answer.json()) ?? {}) as Partial<Problem>
+    if (typeof code !== 'string' || typeof detail !== 'string') return unreadable()
+    return new ApiError(code, answer.status, detail, Array.isArray(fields) ? fields : [])
   } catch {
-    return {
-      code: 'failed',
-      detail: 'The server gave no readable answer. Nothing was saved; try again in a moment.',
-    }
+    return unreadable()
   }
 }
 

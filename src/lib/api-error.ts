@@ -1,4 +1,4 @@
-/** A refusal of the server, or the network's silence (`offline`). */
+/** A refusal of the server, or, with status 0, no answer of the server at all (`offline`, `unreadable`). */
 export class ApiError extends Error {
   constructor(
     readonly code: string,
@@ -12,7 +12,19 @@ export class ApiError extends Error {
 }
 
 export const offline = () =>
-  new ApiError('offline', 0, 'There is no connection to the server. Check the signal and try again.')
+  new ApiError(
+    'offline',
+    0,
+    'There is no connection to the server. What is on the screen stays. Check the signal and try again.',
+  )
+
+/** Something answered, but not the server: a public network's own page, or a proxy's. */
+export const unreadable = () =>
+  new ApiError(
+    'unreadable',
+    0,
+    'Something other than the server answered. What is on the screen stays. Check the connection, then try again.',
+  )
 
 /** One sentence for people, whatever went wrong. */
 export const messageOf = (error: unknown): string =>
