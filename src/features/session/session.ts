@@ -1,4 +1,5 @@
-import { queryOptions, useQuery } from '@tanstack/react-query'
+import { queryOptions } from '@tanstack/react-query'
+import { createContext, use } from 'react'
 import { signInAddresses } from './sign-in-addresses'
 import type { Ability } from '@shared/permissions/abilities'
 import { can } from '@shared/permissions/abilities'
@@ -15,11 +16,17 @@ export const sessionQuery = queryOptions({
   staleTime: 60_000,
 })
 
-/** Who is signed in, behind `RequireSession`, where somebody always is. @throws when asked elsewhere. */
+/**
+ * The session as the layout of the signed-in pages found it. Handed down rather than read from the kept answers: those
+ * can be emptied at any moment, and a page still on the screen would be left without anybody.
+ */
+export const SessionContext = createContext<Session | null>(null)
+
+/** Who is signed in, below the layout of the signed-in pages, where somebody always is. @throws when asked elsewhere. */
 export function useSession(): Session {
-  const { data } = useQuery(sessionQuery)
-  if (!data) throw new Error('This part of the program is for people who are signed in.')
-  return data
+  const session = use(SessionContext)
+  if (!session) throw new Error('This part of the program is for people who are signed in.')
+  return session
 }
 
 /** Whether the person signed in may do this; the server asks again. */

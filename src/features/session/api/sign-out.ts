@@ -10,7 +10,8 @@ export function useSignOut() {
   return useMutation({
     mutationFn: () => call(accounts.signOut),
     onSuccess: async () => {
-      await navigate('/sign-in')
+      // The page is left before what it shows is taken away.
+      await navigate('/sign-in', { flushSync: true })
       queries.clear()
     },
   })
