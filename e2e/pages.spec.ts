@@ -1,5 +1,5 @@
 import type { Page } from '@playwright/test'
-import { expectSoundPage } from './support/page-checks'
+import { expectSoundPage, narrow } from './support/page-checks'
 import { demoSignIn, signInByHand } from './support/sign-in'
 import { expect, test } from './support/test'
 
@@ -17,12 +17,6 @@ async function openDemoSurvey(page: Page): Promise<string> {
     .click()
   await expect(page.getByRole('application')).toBeVisible()
   return new URL(page.url()).pathname
-}
-
-/** A phone at its narrowest; a desk stays a desk. */
-async function narrow(page: Page): Promise<void> {
-  const size = page.viewportSize()
-  if (size && size.width < 600) await page.setViewportSize({ width: 360, height: 740 })
 }
 
 test('pages before sign-in are sound, light and dark', async ({ page }) => {

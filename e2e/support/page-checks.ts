@@ -2,6 +2,12 @@ import AxeBuilder from '@axe-core/playwright'
 import type { Page } from '@playwright/test'
 import { expect } from './test'
 
+/** A phone at its narrowest; a desk stays a desk. */
+export async function narrow(page: Page): Promise<void> {
+  const size = page.viewportSize()
+  if (size && size.width < 600) await page.setViewportSize({ width: 360, height: 740 })
+}
+
 /** Nothing on the page reaches beyond its right edge; wide tables scroll in a box of their own. */
 export async function expectNoSidewaysScroll(page: Page): Promise<void> {
   const { scroll, client } = await page.evaluate(() => {
