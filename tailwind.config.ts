@@ -40,6 +40,6 @@ export default {
     },
     fontWeight: { normal: '400', medium: '500', semibold: '600' },
     borderRadius: { none: '0', DEFAULT: '6px', full: '9999px' },
-    boxShadow: { none: 'none', float: '0 4px 20px rgb(16 22 21 / 18%)' },
+    boxShadow: { none: 'none', float: `0 4px 20px ${token('float')}` },
   },
 } satisfies Config

@@ -13,6 +13,7 @@ import { Link, NavLink, Outlet } from 'react-router-dom'
 import type { Session } from '@shared/schemas/session'
 import { classes } from '@/components/classes'
 import { Menu, MenuItem, MenuLabel, MenuLink } from '@/components/menu'
+import { SkipLink } from '@/components/skip-link'
 import { Brand } from '@/components/taut-line'
 import { sayProblem } from '@/components/toast'
 import { useSignOut } from '@/features/session/api/sign-out'
@@ -26,18 +27,14 @@ const places: { to: string; label: string; Icon: ComponentType<{ className?: str
   { to: paths.hardware, label: 'Hardware', Icon: Wrench },
   { to: paths.houseRules, label: 'House rules', Icon: Ruler },
   { to: paths.people, label: 'People', Icon: Users },
+  { to: paths.company, label: 'Company', Icon: Building2 },
 ]
 
 /** The frame of every page but the editor: a bar at the top on a desk, one under the thumb on a phone. */
 export default function Frame({ session }: { session: Session }) {
   return (
     <div className="flex min-h-dvh flex-col">
-      <a
-        href="#content"
-        className="sr-only focus:not-sr-only focus:fixed focus:left-2 focus:top-2 focus:z-50 focus:rounded focus:bg-card focus:p-3"
-      >
-        Skip to the content
-      </a>
+      <SkipLink />
       <header className="sticky top-0 z-30 border-b border-rule bg-paper print:hidden">
         <div className="mx-auto flex h-14 max-w-6xl items-center gap-4 px-4">
           <Link to={paths.jobs} aria-label="Tautbook, to the jobs" className="rounded">
@@ -125,9 +122,6 @@ function AccountMenu({ session }: { session: Session }) {
       </MenuLabel>
       <MenuLink to={paths.account}>
         <CircleUserRound aria-hidden="true" className="size-5" /> Account
-      </MenuLink>
-      <MenuLink to={paths.company}>
-        <Building2 aria-hidden="true" className="size-5" /> Company
       </MenuLink>
       <MenuItem onSelect={turnTheme}>
         <SunMoon aria-hidden="true" className="size-5" /> Colours: {themeNames[theme]}

@@ -1,4 +1,5 @@
 import { useSyncExternalStore } from 'react'
+import { Banner } from '@/components/banner'
 
 function subscribe(listener: () => void): () => void {
   window.addEventListener('online', listener)
@@ -13,12 +14,5 @@ function subscribe(listener: () => void): () => void {
 export function OfflineBanner() {
   const online = useSyncExternalStore(subscribe, () => navigator.onLine)
   if (online) return null
-  return (
-    <p
-      role="status"
-      className="bg-marker-ground px-4 py-2 text-center text-sm font-medium text-marker print:hidden"
-    >
-      No connection. What is on the screen stays; nothing new can be fetched or sent.
-    </p>
-  )
+  return <Banner>No connection. What is on the screen stays; nothing new can be fetched or sent.</Banner>
 }

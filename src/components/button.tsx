@@ -6,7 +6,7 @@ export type ButtonLook = 'primary' | 'secondary' | 'quiet' | 'danger'
 
 const looks: Record<ButtonLook, string> = {
   primary: 'bg-spruce text-on-spruce border-spruce hover:opacity-90',
-  secondary: 'bg-card text-ink border-rule hover:border-ink',
+  secondary: 'bg-card text-ink border-steel hover:border-ink',
   quiet: 'bg-transparent text-spruce border-transparent hover:bg-card',
   danger: 'bg-card text-stop border-stop hover:bg-stop-ground',
 }
@@ -14,7 +14,7 @@ const looks: Record<ButtonLook, string> = {
 export const buttonClasses = (look: ButtonLook, className?: string): string =>
   classes(
     'inline-flex min-h-12 items-center justify-center gap-2 rounded border px-4 py-2 text-base font-medium',
-    'disabled:cursor-not-allowed disabled:opacity-50 aria-disabled:opacity-50',
+    'disabled:cursor-not-allowed disabled:opacity-50 aria-disabled:cursor-progress aria-disabled:opacity-50',
     looks[look],
     className,
   )
@@ -30,16 +30,19 @@ export function Button({
   busy = false,
   className,
   children,
-  disabled,
+  onClick,
   ...rest
 }: ButtonProps) {
   return (
     <button
       type="button"
       className={buttonClasses(look, className)}
-      disabled={disabled === true || busy}
-      aria-busy={busy}
+      // Not `disabled`: that would take the keyboard's place on the page away while the work is under way.
+      aria-disabled={busy || undefined}
+      aria-busy={busy || undefined}
       {...rest}
+      // A form is sent by pressing its button, also when Enter does it.
+      onClick={busy ? (event) => event.preventDefault() : onClick}
     >
       {children}
       {busy && <span aria-hidden="true">…</span>}

@@ -40,7 +40,7 @@ export function ChoiceGroup<Value extends string>({
               'inline-flex min-h-12 items-center rounded border px-3 text-base',
               'has-focus-visible:outline-2 has-focus-visible:outline-offset-2 has-focus-visible:outline-chalk',
               'has-checked:border-chalk has-checked:bg-chalk-ground has-checked:font-medium has-disabled:opacity-60',
-              'border-rule bg-card',
+              'border-steel bg-card',
             )}
           >
             <input
@@ -85,5 +85,35 @@ export function Checkbox({ label, hint, ...rest }: CheckboxProps) {
         ) : null}
       </span>
     </label>
+  )
+}
+
+interface CheckboxGroupProps {
+  label: string
+  hint?: ReactNode
+  error?: string | undefined
+  /** Checkboxes. */
+  children: ReactNode
+}
+
+/** Several checkboxes under one question. */
+export function CheckboxGroup({ label, hint, error, children }: CheckboxGroupProps) {
+  const id = useId()
+  const described = [hint ? `${id}-hint` : '', error ? `${id}-error` : ''].filter(Boolean).join(' ')
+  return (
+    <fieldset className="min-w-0" aria-describedby={described || undefined}>
+      <legend className="text-sm font-medium text-soft">{label}</legend>
+      {hint ? (
+        <p id={`${id}-hint`} className="text-sm text-soft">
+          {hint}
+        </p>
+      ) : null}
+      {children}
+      {error ? (
+        <p id={`${id}-error`} role="alert" className="text-sm font-medium text-stop">
+          {error}
+        </p>
+      ) : null}
+    </fieldset>
   )
 }

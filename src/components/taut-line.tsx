@@ -35,6 +35,27 @@ export function TautLine({ share = 1, busy = false, className }: TautLineProps) 
   )
 }
 
+interface ProgressProps {
+  /** What is under way: `Sending the photo`. */
+  label: string
+  /** 0 to 1. */
+  share: number
+}
+
+/** How far some work has come: the line tightens from slack to taut, and the figure beside says the same. */
+export function Progress({ label, share }: ProgressProps) {
+  const percent = Math.round(Math.min(1, Math.max(0, share)) * 100)
+  return (
+    <div role="progressbar" aria-label={label} aria-valuenow={percent} aria-valuemin={0} aria-valuemax={100}>
+      <span className="figures flex justify-between gap-3 text-sm text-soft">
+        <span>{label}</span>
+        <span>{percent} %</span>
+      </span>
+      <TautLine share={share} />
+    </div>
+  )
+}
+
 /** Tautbook's mark and name. */
 export function Brand({ className }: { className?: string }) {
   return (
