@@ -86,6 +86,6 @@ test('@desk types a survey into the tables, pastes a column and reads its cut li
   await page.getByLabel('Add a bottom reading to B1').press('Enter')
   await expect(page.getByText('Saved')).toBeVisible()
 
-  await page.getByRole('link', { name: 'Cut list' }).click()
+  await page.getByRole('button', { name: 'Cut list' }).click()
   await expect(page.getByRole('table', { name: /Cables of run R1/ }).locator('tbody tr')).toHaveCount(11)
 })

@@ -1,6 +1,6 @@
 import { useState } from 'react'
 import { Link, useParams } from 'react-router-dom'
-import { Button, ButtonLink } from '@/components/button'
+import { Button } from '@/components/button'
 import { Page } from '@/components/page'
 import { Sheet } from '@/components/sheet'
 import { ErrorNote, Loading } from '@/components/states'
@@ -17,6 +17,7 @@ import { RunsTable } from '@/features/survey-editor/table/runs-table'
 import { type Paste, usePaste } from '@/features/survey-editor/table/use-paste'
 import { messageOf } from '@/lib/api-error'
 import { paths } from '../paths'
+import { useGoWhenSaved } from '../use-go-when-saved'
 import { type Loaded, useSurveyData, useSurveySession } from '../survey-session'
 
 /** The survey as tables: for those who would rather type, and for screen readers. */
@@ -34,7 +35,8 @@ export function Component() {
 }
 
 function SurveyTable({ loaded }: { loaded: Loaded }) {
-  const { view, actions, record, queueState, editor } = useSurveySession(loaded)
+  const { view, actions, record, queue, queueState, editor } = useSurveySession(loaded)
+  const go = useGoWhenSaved(queue)
   const [paste, setPaste] = useState<Paste | null>(null)
   const { lines, apply } = usePaste(view, actions, paste)
   const { selection, survey, canEdit } = view
@@ -59,8 +61,8 @@ function SurveyTable({ loaded }: { loaded: Loaded }) {
           <Button disabled={!canRedo} onClick={actions.redo}>
             Redo
           </Button>
-          <ButtonLink to={paths.survey(record.id)}>Photo</ButtonLink>
-          <ButtonLink to={paths.cutList(record.id)}>Cut list</ButtonLink>
+          <Button onClick={() => go(paths.survey(record.id))}>Photo</Button>
+          <Button onClick={() => go(paths.cutList(record.id))}>Cut list</Button>
         </>
       }
     >

@@ -1,5 +1,5 @@
 import { lazy, Suspense, useEffect, useState, useSyncExternalStore } from 'react'
-import { useNavigate, useSearchParams } from 'react-router-dom'
+import { useSearchParams } from 'react-router-dom'
 import { Sheet } from '@/components/sheet'
 import { Loading } from '@/components/states'
 import { sayDone, sayProblem } from '@/components/toast'
@@ -13,6 +13,7 @@ import { useWakeLock } from '@/lib/wake-lock'
 import { OfflineBanner } from '../offline-banner'
 import { paths } from '../paths'
 import { type Loaded, type SurveySession, useSurveySession } from '../survey-session'
+import { useGoWhenSaved } from '../use-go-when-saved'
 import { PhotoArea } from './photo-area'
 import { SidePanel } from './side-panel'
 import { useCaptions } from './use-captions'
@@ -30,7 +31,8 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
   const state = useSyncExternalStore(editor.subscribe, editor.getSnapshot)
   const [sheet, setSheet] = useState<'settings' | 'keys' | null>(null)
   const captions = useCaptions(view)
-  const toCutList = useCutList(session)
+  const go = useGoWhenSaved(session.queue)
+  const toCutList = () => go(paths.cutList(record.id))
   useKeys(editor)
   useWakeLock()
   useOpenAt(session)
@@ -47,7 +49,8 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
         saving={{ unsent: queueState.pending.length, waiting: queueState.waiting }}
         undo={state.canUndo ? actions.undo : null}
         redo={state.canRedo ? actions.redo : null}
-        links={{ table: paths.surveyTable(record.id), history: paths.surveyHistory(record.id) }}
+        onTable={() => go(paths.surveyTable(record.id))}
+        onHistory={() => go(paths.surveyHistory(record.id))}
         onCutList={toCutList}
         onSettings={() => setSheet('settings')}
         onKeys={() => setSheet('keys')}
@@ -87,22 +90,6 @@ function removePhoto({ editor, actions }: SurveySession, photoId: string | null)
   if (photoId === null) return
   editor.perform({ type: 'photo.remove', id: photoId })
   sayDone(`Photo ${photoId} removed, with its marks; the posts stay.`, actions.undo)
-}
-
-/** Goes to the cut list once what was changed has reached the server, so that the list is of this survey. */
-function useCutList({ queue, record }: SurveySession): () => void {
-  const navigate = useNavigate()
-  return () => {
-    void queue.settled().then(() => {
-      if (queue.getSnapshot().pending.length > 0) {
-        sayProblem(
-          'Some changes have not reached the server yet. They are kept on this screen; try again with signal.',
-        )
-        return undefined
-      }
-      return navigate(paths.cutList(record.id))
-    })
-  }
 }
 
 /** An address with `?bay=B2` opens the survey with that in hand: where a finding leads. */

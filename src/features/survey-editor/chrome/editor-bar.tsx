@@ -12,7 +12,7 @@ import {
 } from 'lucide-react'
 import { Link } from 'react-router-dom'
 import { IconButton } from '@/components/button'
-import { Menu, MenuItem, MenuLink } from '@/components/menu'
+import { Menu, MenuItem } from '@/components/menu'
 import { SaveState } from './save-state'
 
 interface EditorBarProps {
@@ -21,7 +21,8 @@ interface EditorBarProps {
   saving: { unsent: number; waiting: boolean }
   undo: (() => void) | null
   redo: (() => void) | null
-  links: { table: string; history: string }
+  onTable: () => void
+  onHistory: () => void
   onCutList: () => void
   onSettings: () => void
   onKeys: () => void
@@ -36,7 +37,8 @@ export function EditorBar({
   saving,
   undo,
   redo,
-  links,
+  onTable,
+  onHistory,
   onCutList,
   onSettings,
   onKeys,
@@ -67,12 +69,12 @@ export function EditorBar({
         <MenuItem onSelect={onCutList}>
           <ClipboardList aria-hidden="true" className="size-5" /> Cut list
         </MenuItem>
-        <MenuLink to={links.table}>
+        <MenuItem onSelect={onTable}>
           <Table2 aria-hidden="true" className="size-5" /> The survey as a table
-        </MenuLink>
-        <MenuLink to={links.history}>
+        </MenuItem>
+        <MenuItem onSelect={onHistory}>
           <History aria-hidden="true" className="size-5" /> History
-        </MenuLink>
+        </MenuItem>
         <MenuItem onSelect={onSettings}>
           <Settings2 aria-hidden="true" className="size-5" /> Guard and units
         </MenuItem>
