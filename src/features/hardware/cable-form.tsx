@@ -13,7 +13,7 @@ import { TextField } from '@/components/field'
 import { LengthField } from '@/components/length-field'
 import { ErrorNote } from '@/components/states'
 import { fieldError, messageOf } from '@/lib/api-error'
-import { useSaveCable } from './api/save-hardware'
+import { useSaveCable } from './api/save-cable'
 import { ForceField } from './force-field'
 import { NumberField } from './number-field'
 

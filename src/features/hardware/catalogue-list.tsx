@@ -1,60 +1,72 @@
 import type { ReactNode } from 'react'
 import { Link } from 'react-router-dom'
 import { Button } from '@/components/button'
+import { type Column, Table } from '@/components/table'
 
 export interface CatalogueLine {
   key: string
   name: string
   id: string
   retired: boolean
-  /** What matters of it, in a few words. */
-  facts: ReactNode
 }
 
-interface CatalogueListProps {
+export interface CatalogueListProps<Line extends CatalogueLine> {
   label: string
-  lines: readonly CatalogueLine[]
+  lines: readonly Line[]
+  /** What a table on a desk shows of each, after its name. */
+  columns: readonly Column<Line>[]
+  /** What a card on a phone shows of each, below its name. */
+  summary: (line: Line) => ReactNode
   pathOf: (key: string) => string
   /** None for somebody who may only look. */
-  onRetire: ((line: CatalogueLine) => void) | null
+  onRetire: ((line: Line) => void) | null
 }
 
-/** Fittings or cables; retired ones are folded away below. */
-export function CatalogueList({ label, lines, pathOf, onRetire }: CatalogueListProps) {
-  const offered = lines.filter(({ retired }) => !retired)
-  const retired = lines.filter((line) => line.retired)
-  const item = (line: CatalogueLine) => (
-    <li
-      key={line.key}
-      className="flex flex-wrap items-center justify-between gap-3 border-b border-rule py-2 last:border-0"
-    >
-      <div className="min-w-0 flex-1">
-        <Link to={pathOf(line.key)} className="inline-block py-1 text-base font-medium text-spruce underline">
-          {line.name}
-        </Link>{' '}
-        <span className="figures text-sm text-soft">{line.id}</span>
-        <p className="figures text-sm">{line.facts}</p>
-      </div>
-      {onRetire ? (
-        <Button
-          look="quiet"
-          aria-label={`${line.retired ? 'Offer' : 'Retire'} ${line.name}`}
-          onClick={() => onRetire(line)}
-        >
-          {line.retired ? 'Offer again' : 'Retire'}
-        </Button>
-      ) : null}
-    </li>
+/** Fittings or cables: a dense table on a desk, cards on a phone. */
+export function CatalogueList<Line extends CatalogueLine>(props: CatalogueListProps<Line>) {
+  const { label, lines, columns, summary, pathOf, onRetire } = props
+  const name = ({ key, name: text }: Line) => (
+    <Link to={pathOf(key)} className="inline-block py-1 font-medium text-spruce underline">
+      {text}
+    </Link>
   )
+  const retire = (line: Line) =>
+    onRetire ? (
+      <Button
+        look="quiet"
+        aria-label={`${line.retired ? 'Offer again' : 'Retire'}: ${line.name}`}
+        onClick={() => onRetire(line)}
+      >
+        {line.retired ? 'Offer again' : 'Retire'}
+      </Button>
+    ) : null
+  const all: Column<Line>[] = [
+    { key: 'name', header: 'Name', cell: name },
+    { key: 'id', header: 'Id', cell: ({ id }) => id },
+    ...columns,
+    ...(onRetire ? [{ key: 'retire', header: <span className="sr-only">Offered</span>, cell: retire }] : []),
+  ]
   return (
     <>
-      <ul aria-label={label}>{offered.map(item)}</ul>
-      {retired.length > 0 ? (
-        <details className="mt-2">
-          <summary className="min-h-12 py-3 font-medium text-soft">Retired ({retired.length})</summary>
-          <ul aria-label={`${label}, retired`}>{retired.map(item)}</ul>
-        </details>
-      ) : null}
+      <Table
+        className="hidden md:block"
+        caption={label}
+        columns={all}
+        rows={lines}
+        keyOf={({ key }) => key}
+      />
+      <ul aria-label={label} className="flex flex-col gap-2 md:hidden">
+        {lines.map((line) => (
+          <li key={line.key} className="rounded border border-rule bg-card p-4">
+            <div className="flex items-baseline justify-between gap-3">
+              <span className="min-w-0 text-lg leading-6">{name(line)}</span>
+              <span className="figures shrink-0 text-sm text-soft">{line.id}</span>
+            </div>
+            {summary(line)}
+            {onRetire ? <div className="-mb-2 -ml-4 mt-1">{retire(line)}</div> : null}
+          </li>
+        ))}
+      </ul>
     </>
   )
 }
