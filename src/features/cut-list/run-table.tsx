@@ -1,6 +1,7 @@
 import { Link } from 'react-router-dom'
 import type { CutListGroup, CutListRow } from '@shared/cut-list/cut-list-rows'
-import { type LengthFormat, writeLength } from '@shared/units/format-length'
+import type { LengthFormat } from '@shared/units/format-length'
+import { toInches, toMillimetres } from '@shared/units/length'
 import { Length } from '@/components/length'
 import { type Column, Table } from '@/components/table'
 import { TakeUpBar } from './take-up-bar'
@@ -78,24 +79,25 @@ export function RunTable({ group, format, workingOf }: RunTableProps) {
   )
 }
 
-/** Take-up is a matter of 64ths. */
-const finer = (format: LengthFormat): LengthFormat =>
-  format.style === 'millimetres' ? format : { ...format, finest: 64 }
+/** Take-up is read as a decimal: it is compared, not measured. */
+const takeUpText = (nm: number, { style }: LengthFormat): string =>
+  style === 'millimetres' ? toMillimetres(nm).toFixed(1) : toInches(nm).toFixed(2)
 
 function TakeUp({
-  cable,
+  cable: { planned, worst, limit },
   format,
 }: {
   cable: Exclude<CutListRow['cable'], { mode: 'none' }>
   format: LengthFormat
 }) {
-  const shown = (nm: number) => writeLength(nm, finer(format))
-  const words = `${shown(cable.planned)} planned, ${shown(cable.worst)} at worst, of ${shown(cable.limit)}`
+  const [used, most, has] = [planned, worst, limit].map((nm) => takeUpText(nm, format))
+  const unit = format.style === 'millimetres' ? 'mm' : 'in'
+  const words = `${used} planned, ${most} at worst, of ${has} ${unit}`
   return (
     <div className="min-w-32">
-      <TakeUpBar planned={cable.planned} worst={cable.worst} limit={cable.limit} words={words} />
+      <TakeUpBar planned={planned} worst={worst} limit={limit} words={words} />
       <span aria-hidden="true" className="text-sm text-soft">
-        {shown(cable.planned)} · {shown(cable.worst)} of {shown(cable.limit)}
+        {used} · {most} of {has} {unit}
       </span>
     </div>
   )
