@@ -8,6 +8,7 @@ import { EntryPage } from '@/features/session/entry-page'
 import { PASSWORD_RULES, PasswordField } from '@/features/session/password-field'
 import { useEntry } from '@/features/session/use-entry'
 import { fieldError, messageOf } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { paths } from '../paths'
 
 /** A one-time link: whom it is for, and the password they choose. */
@@ -31,6 +32,7 @@ export function Component() {
     )
   }
   const { company, name, email } = invitation.data
+  const message = formMessage(error, ['password'])
   return (
     <EntryPage title={`Welcome, ${name}`}>
       <p className="mb-4">
@@ -46,7 +48,7 @@ export function Component() {
           hint={PASSWORD_RULES}
           error={fieldError(error, 'password')}
         />
-        {error ? <ErrorNote message={messageOf(error)} /> : null}
+        {message ? <ErrorNote message={message} /> : null}
         <Button type="submit" look="primary" busy={busy}>
           Set password and sign in
         </Button>

@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query'
 import { useState } from 'react'
 import { Link, useNavigate, useParams } from 'react-router-dom'
 import { surveys as surveyEndpoints } from '@shared/endpoints/surveys'
-import type { Stage } from '@shared/schemas/job'
+import type { Job, Stage } from '@shared/schemas/job'
 import type { SurveySummary } from '@shared/schemas/survey-record'
 import { Button, ButtonLink } from '@/components/button'
 import { Page } from '@/components/page'
@@ -11,6 +11,7 @@ import { StageStepper } from '@/components/stage-stepper'
 import { EmptyState, ErrorNote, Loading } from '@/components/states'
 import { sayDone } from '@/components/toast'
 import { jobQuery } from '@/features/jobs/api/read-job'
+import { Due } from '@/features/jobs/due-date'
 import { JobDetails } from '@/features/jobs/job-details'
 import { JobForm } from '@/features/jobs/job-form'
 import { NewSurvey } from '@/features/jobs/new-survey'
@@ -31,6 +32,9 @@ const back = (
     Jobs
   </Link>
 )
+
+/** Whether its due date is still waited for. */
+const isOpen = ({ stage }: Job): boolean => stage !== 'done' && stage !== 'lost'
 
 export function Component() {
   const { jobId = '' } = useParams()
@@ -62,7 +66,13 @@ export function Component() {
       title={job.title}
       above={
         <>
-          {back} / {job.number}
+          {back} / No. {job.number}
+          {isOpen(job) && job.due ? (
+            <>
+              {' · '}
+              <Due job={job} />
+            </>
+          ) : null}
         </>
       }
       actions={may.edit ? <Button onClick={() => setSheet('edit')}>Edit</Button> : null}

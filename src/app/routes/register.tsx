@@ -8,7 +8,8 @@ import { registerCompany } from '@/features/session/api/register-company'
 import { EntryPage } from '@/features/session/entry-page'
 import { PASSWORD_RULES, PasswordField } from '@/features/session/password-field'
 import { useEntry } from '@/features/session/use-entry'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { paths } from '../paths'
 
 const unitChoices = [
@@ -20,6 +21,7 @@ export function Component() {
   const [length, setLength] = useState<'in' | 'mm'>('in')
   const { form, submit, error, busy } = useEntry(registerCompany(length))
   const of = (path: string) => fieldError(error, path)
+  const message = formMessage(error, ['company', 'name', 'email', 'password'])
   return (
     <EntryPage title="Register your company">
       <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
@@ -56,7 +58,7 @@ export function Component() {
           error={of('password')}
         />
         <p className="text-sm text-soft">You become the company’s owner and can add everybody else.</p>
-        {error ? <ErrorNote message={messageOf(error)} /> : null}
+        {message ? <ErrorNote message={message} /> : null}
         <Button type="submit" look="primary" busy={busy}>
           Register
         </Button>

@@ -6,11 +6,13 @@ import { signIn } from '@/features/session/api/sign-in'
 import { EntryPage } from '@/features/session/entry-page'
 import { PasswordField } from '@/features/session/password-field'
 import { useEntry } from '@/features/session/use-entry'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { paths } from '../paths'
 
 export function Component() {
   const { form, submit, error, busy } = useEntry(signIn)
+  const message = formMessage(error, ['email', 'password'])
   return (
     <EntryPage title="Sign in">
       <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
@@ -28,7 +30,7 @@ export function Component() {
           autoComplete="current-password"
           error={fieldError(error, 'password')}
         />
-        {error ? <ErrorNote message={messageOf(error)} /> : null}
+        {message ? <ErrorNote message={message} /> : null}
         <Button type="submit" look="primary" busy={busy}>
           Sign in
         </Button>

@@ -6,7 +6,8 @@ import { TextField } from '@/components/field'
 import { ErrorNote } from '@/components/states'
 import { sayDone } from '@/components/toast'
 import { useFirstFault } from '@/components/use-first-fault'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { useChangeCompany } from './api/change-company'
 
 const units = [
@@ -39,6 +40,7 @@ export function CompanyForm({ company }: { company: Company }) {
       { onSuccess: () => sayDone('Saved.') },
     )
   }
+  const message = formMessage(change.error, ['name'])
   return (
     <form ref={form} onSubmit={submit} className="flex flex-col gap-5">
       <TextField
@@ -71,7 +73,7 @@ export function CompanyForm({ company }: { company: Company }) {
         hint="Off: the place is dropped from every photo before it is stored."
         defaultChecked={company.keepPhotoPlace}
       />
-      {change.error ? <ErrorNote message={messageOf(change.error)} /> : null}
+      {message ? <ErrorNote message={message} /> : null}
       <Button type="submit" look="primary" busy={change.isPending} className="sm:self-start">
         Save
       </Button>

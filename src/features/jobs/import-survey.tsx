@@ -71,7 +71,7 @@ function Refused({ error, name }: { error: Error; name: string }) {
   const faults = error instanceof ApiError ? error.fields : []
   return (
     <>
-      <ErrorNote message={`${name}: ${messageOf(error)} Nothing was imported.`} />
+      <ErrorNote message={`${name}: ${messageOf(error)}`} />
       <ul aria-label="What is wrong in the file" className="figures list-disc pl-5 text-sm">
         {faults.map(({ path, message }) => (
           <li key={`${path} ${message}`}>

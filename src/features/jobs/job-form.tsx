@@ -5,7 +5,8 @@ import { Button } from '@/components/button'
 import { SelectField, TextArea, TextField } from '@/components/field'
 import { ErrorNote } from '@/components/states'
 import { useFirstFault } from '@/components/use-first-fault'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { type JobFields, useSaveJob } from './api/save-job'
 import { peopleToChoose } from './people-to-choose'
 
@@ -38,6 +39,7 @@ export function JobForm({ job, people, onSaved }: JobFormProps) {
     save.mutate(fieldsOf(new FormData(event.currentTarget)))
   }
   const of = (path: string) => fieldError(save.error, path)
+  const message = formMessage(save.error, ['title', 'customer', 'site', 'due', 'personId', 'notes'])
   return (
     <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
       <TextField
@@ -67,7 +69,7 @@ export function JobForm({ job, people, onSaved }: JobFormProps) {
         ))}
       </SelectField>
       <TextArea label="Notes" name="notes" maxLength={4000} defaultValue={job?.notes} error={of('notes')} />
-      {save.error ? <ErrorNote message={messageOf(save.error)} /> : null}
+      {message ? <ErrorNote message={message} /> : null}
       <Button type="submit" look="primary" busy={save.isPending}>
         {job ? 'Save' : 'Open the job'}
       </Button>

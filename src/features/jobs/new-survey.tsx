@@ -3,7 +3,8 @@ import { Button } from '@/components/button'
 import { TextField } from '@/components/field'
 import { ErrorNote } from '@/components/states'
 import { useFirstFault } from '@/components/use-first-fault'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { useAddSurvey } from './api/add-survey'
 import { ImportSurvey } from './import-survey'
 
@@ -21,6 +22,7 @@ export function NewSurvey({ jobId, onBegun }: NewSurveyProps) {
     const title = new FormData(event.currentTarget).get('title')
     add.mutate(typeof title === 'string' ? title.trim() : '', { onSuccess: ({ id }) => onBegun(id) })
   }
+  const message = formMessage(add.error, ['title'])
   return (
     <div className="flex flex-col gap-6">
       <form ref={form} onSubmit={submit} className="flex flex-col gap-3">
@@ -32,7 +34,7 @@ export function NewSurvey({ jobId, onBegun }: NewSurveyProps) {
           hint="Such as Back deck"
           error={fieldError(add.error, 'title')}
         />
-        {add.error ? <ErrorNote message={messageOf(add.error)} /> : null}
+        {message ? <ErrorNote message={message} /> : null}
         <Button type="submit" look="primary" busy={add.isPending}>
           Begin the survey
         </Button>

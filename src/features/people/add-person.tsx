@@ -4,7 +4,8 @@ import { Button } from '@/components/button'
 import { TextField } from '@/components/field'
 import { ErrorNote } from '@/components/states'
 import { useFirstFault } from '@/components/use-first-fault'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { useAddPerson } from './api/add-person'
 import { OneTimeLink } from './one-time-link'
 import { RoleChecks } from './role-checks'
@@ -29,6 +30,7 @@ export function AddPerson() {
     return <OneTimeLink name={person.name} link={link} expires={expires} />
   }
   const of = (path: string) => fieldError(add.error, path)
+  const message = formMessage(add.error, ['name', 'email', 'roles'])
   return (
     <form ref={form} onSubmit={submit} className="flex flex-col gap-4">
       <TextField label="Name" name="name" autoComplete="off" required maxLength={120} error={of('name')} />
@@ -41,7 +43,7 @@ export function AddPerson() {
         error={of('email')}
       />
       <RoleChecks value={roles} onChange={setRoles} error={of('roles')} />
-      {add.error ? <ErrorNote message={messageOf(add.error)} /> : null}
+      {message ? <ErrorNote message={message} /> : null}
       <Button type="submit" look="primary" busy={add.isPending}>
         Add and make the link
       </Button>

@@ -3,7 +3,8 @@ import type { Person } from '@shared/schemas/person'
 import { Button } from '@/components/button'
 import { ErrorNote } from '@/components/states'
 import { sayDone } from '@/components/toast'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { useChangePerson } from './api/change-person'
 import { RoleChecks } from './role-checks'
 
@@ -18,10 +19,11 @@ export function EditRoles({ person, onSaved }: { person: Person; onSaved: () => 
     }
     change.mutate({ roles }, { onSuccess })
   }
+  const message = formMessage(change.error, ['roles'])
   return (
     <div className="flex flex-col gap-4">
       <RoleChecks value={roles} onChange={setRoles} error={fieldError(change.error, 'roles')} />
-      {change.error ? <ErrorNote message={messageOf(change.error)} /> : null}
+      {message ? <ErrorNote message={message} /> : null}
       <Button look="primary" busy={change.isPending} onClick={save}>
         Save roles
       </Button>

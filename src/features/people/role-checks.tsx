@@ -1,5 +1,5 @@
 import { roleMeanings, roles, type Role } from '@shared/permissions/roles'
-import { Checkbox } from '@/components/choices'
+import { Checkbox, CheckboxGroup } from '@/components/choices'
 
 interface RoleChecksProps {
   value: readonly Role[]
@@ -10,24 +10,20 @@ interface RoleChecksProps {
 /** Roles, several at once, each with what it means. */
 export function RoleChecks({ value, onChange, error }: RoleChecksProps) {
   return (
-    <fieldset>
-      <legend className="text-sm font-medium text-soft">Roles</legend>
-      {roles.map((role) => (
+    <CheckboxGroup label="Roles" error={error}>
+      {roles.map((role, i) => (
         <Checkbox
           key={role}
           label={role}
           hint={roleMeanings[role]}
+          // The first of them is where a refusal leads the keyboard.
+          aria-invalid={i === 0 && error !== undefined}
           checked={value.includes(role)}
           onChange={(event) =>
             onChange(event.target.checked ? [...value, role] : value.filter((held) => held !== role))
           }
         />
       ))}
-      {error ? (
-        <p role="alert" className="text-sm font-medium text-stop">
-          {error}
-        </p>
-      ) : null}
-    </fieldset>
+    </CheckboxGroup>
   )
 }

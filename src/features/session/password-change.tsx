@@ -3,7 +3,8 @@ import { Button } from '@/components/button'
 import { ErrorNote } from '@/components/states'
 import { sayDone } from '@/components/toast'
 import { useFirstFault } from '@/components/use-first-fault'
-import { fieldError, messageOf } from '@/lib/api-error'
+import { fieldError } from '@/lib/api-error'
+import { formMessage } from '@/lib/form-message'
 import { useChangePassword } from './api/change-password'
 import { PASSWORD_RULES, PasswordField } from './password-field'
 
@@ -22,6 +23,7 @@ export function PasswordChange({ email }: { email: string }) {
     }
     change.mutate({ current: fields['current'] ?? '', next: fields['next'] ?? '' }, { onSuccess })
   }
+  const message = formMessage(change.error, ['current', 'next'])
   return (
     <section className="rounded border border-rule bg-card p-4" aria-labelledby={heading}>
       <h2 id={heading} className="mb-3 text-lg font-semibold">
@@ -43,7 +45,7 @@ export function PasswordChange({ email }: { email: string }) {
           hint={PASSWORD_RULES}
           error={fieldError(change.error, 'next')}
         />
-        {change.error ? <ErrorNote message={messageOf(change.error)} /> : null}
+        {message ? <ErrorNote message={message} /> : null}
         <Button type="submit" look="primary" busy={change.isPending} className="sm:self-start">
           Change password
         </Button>
