@@ -119,7 +119,7 @@ export function FittingForm({ known, cables, format, readOnly, onSaved }: Fittin
           value={fitting.mount}
           onChange={(mount) => set({ mount })}
         />
-        <FittingDrawing fitting={fitting} />
+        <FittingDrawing fitting={fitting} format={format} />
         <div className="grid gap-4 md:grid-cols-2">
           {lengths.map(({ key, label, hint }) => (
             <LengthField
