@@ -1,9 +1,10 @@
 import { useQuery } from '@tanstack/react-query'
+import { useBlocker } from 'react-router-dom'
 import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
 import type { Hardware } from '@shared/schemas/hardware'
 import type { HouseRules } from '@shared/schemas/house-rules'
 import type { PhotoRecord, SurveyRecord } from '@shared/schemas/survey-record'
-import { sayProblem } from '@/components/toast'
+import { askBefore, sayProblem } from '@/components/toast'
 import { hardwareQuery } from '@/features/hardware/api/read-hardware'
 import { houseRulesQuery } from '@/features/hardware/api/read-house-rules'
 import { usableHardware } from '@/features/hardware/usable-hardware'
@@ -66,7 +67,7 @@ export function useSurveySession(loaded: Loaded): SurveySession {
   const state = useSyncExternalStore(editor.subscribe, editor.getSnapshot)
   const queueState = useSyncExternalStore(queue.subscribe, queue.getSnapshot)
   useSendOnReturn(queue)
-  useWarnBeforeLeaving(queueState.pending.length > 0)
+  useWarnBeforeLeaving(queueState)
   const { survey, selection } = state
   const view = useMemo<EditorView>(
     () => ({
@@ -140,12 +141,32 @@ function useSendOnReturn(queue: ChangeQueue): void {
   }, [queue])
 }
 
-/** The browser asks before it drops what has not been sent. */
-function useWarnBeforeLeaving(unsent: boolean): void {
+/**
+ * Nothing unsent is dropped by leaving. The browser asks before it closes the tab; another page of ours waits until all
+ * is sent, and without signal it asks.
+ */
+function useWarnBeforeLeaving({ pending: { length: unsent }, waiting }: QueueState): void {
   useEffect(() => {
-    if (!unsent) return
+    if (unsent === 0) return
     const warn = (event: BeforeUnloadEvent) => event.preventDefault()
     window.addEventListener('beforeunload', warn)
     return () => window.removeEventListener('beforeunload', warn)
   }, [unsent])
+  const blocker = useBlocker(
+    ({ currentLocation, nextLocation }) => unsent > 0 && currentLocation.pathname !== nextLocation.pathname,
+  )
+  useEffect(() => {
+    if (blocker.state !== 'blocked') return
+    if (unsent === 0) {
+      blocker.proceed()
+      return
+    }
+    if (!waiting) return
+    const changes = unsent === 1 ? 'One change has' : `${unsent} changes have`
+    return askBefore(`${changes} not been sent yet and would be lost. Stay here until there is signal.`, {
+      label: 'Leave all the same',
+      onGo: blocker.proceed,
+      onStay: blocker.reset,
+    })
+  }, [blocker, unsent, waiting])
 }

@@ -26,6 +26,8 @@ export class ChangeQueue {
   private readonly listeners = new Set<() => void>()
   private running: Promise<void> | undefined
   private timer: ReturnType<typeof setTimeout> | undefined
+  /** The lasting trouble that was told already; it is not told again with every try. */
+  private told = ''
 
   constructor(
     { survey, revision }: { survey: Survey; revision: number },
@@ -69,6 +71,7 @@ export class ChangeQueue {
       try {
         const { revision } = await this.deps.send({ revision: this.state.revision, changes })
         this.take({ type: 'accepted', revision })
+        this.told = ''
       } catch (error) {
         if (!(await this.recover(error))) return
       }
@@ -81,7 +84,9 @@ export class ChangeQueue {
     if (!refusal) return this.wait()
     // Signed out, or asked too often: what is pending stays, and is sent when that is mended.
     if (refusal.status === 401 || refusal.status === 429) {
-      this.deps.onTrouble(`${refusal.message} ${this.count()} kept on this screen.`)
+      if (this.told !== refusal.code)
+        this.deps.onTrouble(`${refusal.message} ${this.count()} kept on this screen.`)
+      this.told = refusal.code
       return this.wait()
     }
     try {

@@ -9,7 +9,7 @@ interface SaveStateProps {
 
 /** How far the survey is saved, in words. */
 export function SaveState({ unsent, waiting }: SaveStateProps) {
-  const text = unsent === 0 ? 'Saved' : waiting ? `On this screen, waiting for signal (${unsent})` : 'Sending'
+  const text = unsent === 0 ? 'Saved' : waiting ? `On this screen, waiting to be sent (${unsent})` : 'Sending'
   return (
     <span
       role="status"

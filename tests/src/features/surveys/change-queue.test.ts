@@ -17,11 +17,13 @@ class FakeServer {
   revision = 0
   reachable = true
   losesAnswers = false
+  refuses: ApiError | undefined
   requests = 0
 
   readonly send = ({ revision, changes }: { revision: number; changes: SurveyChange[] }) => {
     this.requests += 1
     if (!this.reachable) return Promise.reject(offline())
+    if (this.refuses) return Promise.reject(this.refuses)
     const fresh = changes.filter(({ id }) => !this.made.some((known) => known.id === id))
     const own = this.made.filter(
       ({ id, revision: at }) => at > revision && changes.some((c) => c.id === id),
@@ -146,5 +148,21 @@ describe('ChangeQueue', () => {
     expect(onTrouble).toHaveBeenCalledWith(expect.stringContaining('The title cannot be that.'))
     expect(ids(server.survey)).toEqual(['P1', 'P2'])
     expect(queue.getSnapshot().shown).toEqual(server.survey)
+  })
+
+  it('tells once, not with every try, that somebody is signed out, and keeps their changes', async () => {
+    const server = new FakeServer()
+    const { queue, onTrouble } = queueOn(server)
+    server.refuses = new ApiError('not-signed-in', 401, 'Sign in to go on.')
+    queue.perform(post('P1'))
+    await queue.settled()
+    queue.flush()
+    await queue.settled()
+    expect(onTrouble).toHaveBeenCalledExactlyOnceWith('Sign in to go on. One change is kept on this screen.')
+    server.refuses = undefined
+    queue.flush()
+    await queue.settled()
+    expect(ids(server.survey)).toEqual(['P1'])
+    queue.stop()
   })
 })
