@@ -45,6 +45,8 @@ export const router = createBrowserRouter([
           },
         ],
       },
+      // Every part on one page, while they are made; a build leaves it out.
+      ...(import.meta.env.DEV ? [{ path: '/look', lazy: () => import('./look/look-page') }] : []),
       { path: '*', lazy: () => import('./routes/not-found') },
     ],
   },

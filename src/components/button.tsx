@@ -14,7 +14,7 @@ const looks: Record<ButtonLook, string> = {
 export const buttonClasses = (look: ButtonLook, className?: string): string =>
   classes(
     'inline-flex min-h-12 items-center justify-center gap-2 rounded border px-4 py-2 text-base font-medium',
-    'disabled:cursor-not-allowed disabled:opacity-50 aria-disabled:cursor-progress aria-disabled:opacity-50',
+    'disabled:cursor-not-allowed disabled:opacity-50 aria-busy:cursor-progress aria-busy:opacity-75',
     looks[look],
     className,
   )

@@ -7,16 +7,21 @@ export type LengthLook = 'measured' | 'computed' | 'struck'
 const looks: Record<LengthLook, string> = {
   measured: 'text-ink',
   computed: 'text-spruce',
-  struck: 'text-soft line-through',
+  // One line across all sizes of figure; a text decoration would break at the fraction.
+  struck:
+    'relative text-soft after:absolute after:inset-x-0 after:top-1/2 after:border-t-2 after:border-current',
 }
 
-/** A fraction as it is set in print: raised numerator, fraction slash, lowered denominator. */
+/**
+ * A fraction as it is set in print: raised numerator, fraction slash, lowered denominator. `static` undoes the shift
+ * that the base styles give raised and lowered text, so that both stand between baseline and cap height.
+ */
 function Fraction({ numerator, denominator }: { numerator: number; denominator: number }) {
   return (
-    <span className="ml-[0.12em]">
-      <sup className="text-[0.62em] leading-none align-[0.45em]">{numerator}</sup>
+    <span className="ml-[0.14em]">
+      <sup className="static align-[0.4em] text-[0.64em] leading-none">{numerator}</sup>
       <span>⁄</span>
-      <sub className="text-[0.62em] leading-none align-baseline">{denominator}</sub>
+      <sub className="static align-baseline text-[0.64em] leading-none">{denominator}</sub>
     </span>
   )
 }

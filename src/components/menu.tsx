@@ -16,6 +16,7 @@ export function Menu({ trigger, children }: MenuProps) {
         <DropdownMenu.Content
           align="end"
           sideOffset={6}
+          collisionPadding={8}
           className="z-50 min-w-56 rounded border border-rule bg-card p-1 shadow-float"
         >
           {children}

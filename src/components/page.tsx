@@ -46,7 +46,7 @@ export function Card({
   className?: string
 }) {
   return (
-    <section className={classes('rounded border border-rule bg-card p-4', className)}>
+    <section className={classes('min-w-0 rounded border border-rule bg-card p-4', className)}>
       {title ? (
         <div className="mb-3 flex flex-wrap items-center justify-between gap-2">
           <h2 className="text-lg font-semibold">{title}</h2>

@@ -33,7 +33,7 @@ test('measured, computed and struck lengths look different, and a struck one is 
   )
   expect(measured).toContain('text-ink')
   expect(computed).toContain('text-spruce')
-  expect(struck).toContain('line-through')
+  expect(struck).toContain('after:border-t-2')
   expect(spoken(struck ?? '')).toBe('struck: 64 1/4&quot;')
 })
 
