@@ -19,6 +19,9 @@ async function openDemoSurvey(page: Page): Promise<string> {
   return new URL(page.url()).pathname
 }
 
+// axe reads every page twice, and a busy machine takes its time.
+test.describe.configure({ timeout: 240_000 })
+
 test('pages before sign-in are sound, light and dark', async ({ page }) => {
   await narrow(page)
   for (const path of ['/sign-in', '/register', '/nothing-here']) {
