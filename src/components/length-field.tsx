@@ -49,6 +49,8 @@ export function LengthField({
           className={`${controlClasses} figures`}
           inputMode="text"
           autoComplete="off"
+          // What a form must not save past: it holds what was typed and is not yet a value.
+          data-unread={fault === undefined ? undefined : true}
           disabled={disabled}
           value={text ?? written(value, format)}
           onChange={(event) => setText(event.target.value)}

@@ -42,6 +42,8 @@ export function NumberField({
           className={`${controlClasses} figures`}
           inputMode="decimal"
           autoComplete="off"
+          // What a form must not save past: it holds what was typed and is not yet a value.
+          data-unread={fault === undefined ? undefined : true}
           disabled={disabled}
           value={text ?? value ?? ''}
           onChange={(event) => setText(event.target.value)}

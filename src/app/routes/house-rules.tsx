@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query'
 import { Page } from '@/components/page'
 import { ErrorNote, Loading } from '@/components/states'
 import { houseRulesQuery } from '@/features/hardware/api/read-house-rules'
+import { HouseRulesFacts } from '@/features/hardware/house-rules-facts'
 import { HouseRulesForm } from '@/features/hardware/house-rules-form'
 import { useMay, useSession } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
@@ -11,6 +12,7 @@ export function Component() {
   const { company } = useSession()
   const mayEdit = useMay('house-rules:edit')
   const { data, error, isPending, refetch } = useQuery(houseRulesQuery)
+  const units = { force: company.units.force, format: lengthFormat(company.units, 64) }
   return (
     <Page title="House rules">
       <p className="mb-4 text-soft">
@@ -20,14 +22,8 @@ export function Component() {
       </p>
       {isPending ? <Loading what="the house rules" /> : null}
       {error ? <ErrorNote message={messageOf(error)} onRetry={() => void refetch()} /> : null}
-      {data ? (
-        <HouseRulesForm
-          rules={data}
-          units={company.units}
-          format={lengthFormat(company.units, 64)}
-          readOnly={!mayEdit}
-        />
-      ) : null}
+      {data && mayEdit ? <HouseRulesForm rules={data} units={units} /> : null}
+      {data && !mayEdit ? <HouseRulesFacts rules={data} units={units} /> : null}
     </Page>
   )
 }

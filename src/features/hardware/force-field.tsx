@@ -1,27 +1,26 @@
 import { type Force, newtons, poundsForce, toPoundsForce } from '@shared/units/force'
-import { NumberField } from './number-field'
+import { NumberField } from '@/components/number-field'
 
 interface ForceFieldProps {
   label: string
   value: Force | undefined
   unit: 'lbf' | 'N'
   onChange: (value: Force | undefined) => void
-  hint?: string | undefined
+  hint?: string
   error?: string | undefined
 }
 
 /** A force in the company's unit. */
-export function ForceField({ value, unit, onChange, label, ...rest }: ForceFieldProps) {
+export function ForceField({ value, unit, onChange, ...rest }: ForceFieldProps) {
   const shown =
     value === undefined ? undefined : Number((unit === 'lbf' ? toPoundsForce(value) : value).toFixed(2))
+  const read = (given: number): Force => (unit === 'lbf' ? poundsForce(given) : newtons(given))
   return (
     <NumberField
-      label={`${label}, ${unit}`}
-      value={shown}
-      onChange={(given) =>
-        onChange(given === undefined ? undefined : unit === 'lbf' ? poundsForce(given) : newtons(given))
-      }
       {...rest}
+      unit={unit}
+      value={shown}
+      onChange={(given) => onChange(given === undefined ? undefined : read(given))}
     />
   )
 }

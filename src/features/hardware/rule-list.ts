@@ -6,14 +6,18 @@ export type LengthRule = {
   [Key in keyof HouseRules]-?: NonNullable<HouseRules[Key]> extends Length ? Key : never
 }[keyof HouseRules]
 
+/** `above` marks lengths that zero is no value for, `optional` those that may be left empty. */
 export type Rule =
-  | { kind: 'length'; key: LengthRule; label: string; meaning: string; optional?: boolean }
+  | { kind: 'length'; key: LengthRule; label: string; meaning: string; optional?: boolean; above?: boolean }
   | {
       kind: 'number'
       key: 'gaugeLimit' | 'maxBend' | 'reserve'
       label: string
       meaning: string
-      percent?: boolean
+      /** A share is written in per cent. */
+      unit: '°' | '%'
+      /** The most that may be written; the least is zero. */
+      most: number
     }
   | { kind: 'force'; key: 'tension'; label: string; meaning: string }
   | {
@@ -50,7 +54,9 @@ export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = 
       {
         kind: 'number',
         key: 'gaugeLimit',
-        label: 'Gauge limit, °',
+        label: 'Gauge limit',
+        unit: '°',
+        most: 10,
         meaning: 'How far the angle gauge may be off.',
       },
       {
@@ -62,11 +68,12 @@ export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = 
     ],
   },
   {
-    title: 'Cutting and crimping',
+    title: 'Cutting',
     rules: [
       {
         kind: 'length',
         key: 'cutStep',
+        above: true,
         label: 'Cut step',
         meaning: 'Cut lengths are rounded up to a whole number of these.',
       },
@@ -106,7 +113,7 @@ export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = 
     ],
   },
   {
-    title: 'Fittings and tension',
+    title: 'Fittings',
     rules: [
       {
         kind: 'force',
@@ -117,9 +124,10 @@ export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = 
       {
         kind: 'number',
         key: 'reserve',
-        label: 'Reserve, %',
+        label: 'Reserve',
+        unit: '%',
+        most: 90,
         meaning: 'Share of the take-up kept for later re-tensioning.',
-        percent: true,
       },
       {
         kind: 'length',
@@ -142,11 +150,12 @@ export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = 
     ],
   },
   {
-    title: 'Runs and heights',
+    title: 'Runs',
     rules: [
       {
         kind: 'length',
         key: 'longestRun',
+        above: true,
         label: 'Longest run',
         meaning: 'Proposed runs are no longer; left empty only the fittings limit them.',
         optional: true,
@@ -154,25 +163,29 @@ export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = 
       {
         kind: 'number',
         key: 'maxBend',
-        label: 'Largest bend, °',
+        label: 'Largest bend',
+        unit: '°',
+        most: 45,
         meaning: 'A run may change its pitch by this much at a post.',
       },
       {
         kind: 'length',
         key: 'holeStep',
+        above: true,
         label: 'Hole step',
         meaning: 'Heights of holes are rounded to a whole number of these.',
       },
       {
         kind: 'length',
         key: 'wideBay',
+        above: true,
         label: 'Wide bay',
         meaning: 'A clear bay beyond this wants a spacer.',
       },
     ],
   },
   {
-    title: 'Reels',
+    title: 'Shop',
     rules: [
       {
         kind: 'length',

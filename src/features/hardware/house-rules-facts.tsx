@@ -1,0 +1,22 @@
+import type { HouseRules } from '@shared/schemas/house-rules'
+import { Card } from '@/components/page'
+import { FactList } from './fact-list'
+import { ruleGroups } from './rule-list'
+import { type HouseUnits, ruleText } from './rule-values'
+
+/** The house rules for those who may not change them. */
+export const HouseRulesFacts = ({ rules, units }: { rules: HouseRules; units: HouseUnits }) => (
+  <div className="flex flex-col gap-4">
+    {ruleGroups.map(({ title, rules: group }) => (
+      <Card key={title} title={title}>
+        <FactList
+          facts={group.map((rule) => ({
+            label: rule.label,
+            value: ruleText(rule, rules, units),
+            meaning: rule.meaning,
+          }))}
+        />
+      </Card>
+    ))}
+  </div>
+)
