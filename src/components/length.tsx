@@ -53,7 +53,8 @@ export function Length({ value, format, look = 'measured', className }: LengthPr
           </>
         ) : (
           <>
-            {parts.feet === undefined ? '' : `${parts.feet}′\u2009`}
+            {/* No space after it: the face gives its single prime a gap of its own. */}
+            {parts.feet === undefined ? '' : `${parts.feet}′`}
             {parts.inches ?? ''}
             {parts.fraction ? <Fraction {...parts.fraction} /> : null}″
           </>
