@@ -70,9 +70,12 @@ export function IconButton({ label, children, pressed, className, ...rest }: Ico
       aria-pressed={pressed}
       title={label}
       className={classes(
-        'inline-flex size-12 shrink-0 items-center justify-center rounded border border-transparent text-ink',
-        'hover:border-rule disabled:cursor-not-allowed disabled:opacity-40',
-        pressed === true && 'bg-chalk-ground text-chalk',
+        'inline-flex size-12 shrink-0 items-center justify-center rounded border',
+        'disabled:cursor-not-allowed disabled:opacity-40',
+        // One or the other: of two colours on one element the stylesheet's order would choose, not this line.
+        pressed === true
+          ? 'border-chalk bg-chalk-ground text-chalk'
+          : 'border-transparent text-ink hover:border-rule',
         className,
       )}
       {...rest}
