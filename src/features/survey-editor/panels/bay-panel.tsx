@@ -2,8 +2,8 @@ import type { Bay } from '@shared/schemas/bay'
 import { removeBays } from '@shared/survey/remove-bay'
 import { Button } from '@/components/button'
 import { ChoiceGroup } from '@/components/choices'
-import { TextField } from '@/components/field'
 import { sayDone } from '@/components/toast'
+import { NumberBox } from './number-box'
 import type { PanelProps } from './selection-panel'
 import { Readings } from './readings'
 import { StairFields } from './stair-fields'
@@ -54,21 +54,22 @@ export function BayPanel({ view, actions, bay, onNext }: PanelProps & { bay: Bay
         <NumberBox
           label="Spacers"
           value={bay.spacers}
-          most={50}
+          bounds={[0, 50]}
+          whole
           disabled={!canEdit}
           onChange={(spacers) => set({ spacers })}
         />
         <NumberBox
           label={`Skew at ${bay.from}, °`}
           value={bay.skewFrom}
-          most={89}
+          bounds={[-89, 89]}
           disabled={!canEdit}
           onChange={(skewFrom) => set({ skewFrom })}
         />
         <NumberBox
           label={`Skew at ${bay.to}, °`}
           value={bay.skewTo}
-          most={89}
+          bounds={[-89, 89]}
           disabled={!canEdit}
           onChange={(skewTo) => set({ skewTo })}
         />
@@ -79,35 +80,5 @@ export function BayPanel({ view, actions, bay, onNext }: PanelProps & { bay: Bay
         </Button>
       )}
     </section>
-  )
-}
-
-interface NumberBoxProps {
-  label: string
-  value: number
-  most: number
-  disabled: boolean
-  onChange: (value: number) => void
-}
-
-/** A small number that is kept when the field is left. */
-export function NumberBox({ label, value, most, disabled, onChange }: NumberBoxProps) {
-  return (
-    <TextField
-      key={value}
-      label={label}
-      type="number"
-      min={0}
-      max={most}
-      step="any"
-      inputMode="decimal"
-      defaultValue={value}
-      disabled={disabled}
-      onBlur={(event) => {
-        const given = event.target.valueAsNumber
-        if (Number.isFinite(given) && given >= 0 && given <= most && given !== value) onChange(given)
-        else event.target.value = String(value)
-      }}
-    />
   )
 }

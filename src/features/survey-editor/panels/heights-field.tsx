@@ -5,6 +5,7 @@ import { parseLength } from '@shared/units/parse-length'
 import { TextArea } from '@/components/field'
 import type { EditorView } from '../model/editor-context'
 import { formatOf } from './format-of'
+import { lengthFault } from './length-bounds'
 
 interface HeightsFieldProps {
   view: EditorView
@@ -18,7 +19,10 @@ export function HeightsField({ view, heights, onChange }: HeightsFieldProps) {
   const format = formatOf(view)
   const lines = (text ?? '').split('\n').filter((line) => line.trim() !== '')
   const parsed = lines.map((line) => parseLength(line, { default: view.units.length }))
-  const fault = parsed.flatMap((each, i) => (each.ok ? [] : [`Line ${i + 1}: ${each.message}`]))[0]
+  const fault = parsed.flatMap((each, i) => {
+    const wrong = each.ok ? lengthFault(each.length) : each.message
+    return wrong === undefined ? [] : [`Line ${i + 1}: ${wrong}`]
+  })[0]
   const keep = () => {
     if (text === null || fault || parsed.length === 0) return
     onChange(parsed.flatMap((each) => (each.ok ? [each.length] : [])).sort((a, b) => a - b))

@@ -4,11 +4,11 @@ import type { OperationOf } from '@shared/survey/survey-operation'
 import { Button } from '@/components/button'
 import { ChoiceGroup } from '@/components/choices'
 import { TextField } from '@/components/field'
-import { LengthField } from '@/components/length-field'
 import { sayDone } from '@/components/toast'
 import { CornerField } from './corner-field'
 import { formatOf } from './format-of'
 import { dressedSizes } from './lumber'
+import { MeasureField } from './measure-field'
 import type { PanelProps } from './selection-panel'
 
 type Fields = Omit<Post, 'id'>
@@ -68,8 +68,9 @@ export function PostPanel({ view, actions, post }: PanelProps & { post: Post }) 
             disabled={!canEdit}
             onChange={(core) => set({ core })}
           />
-          <LengthField
+          <MeasureField
             label="Thickness of the cover"
+            least="zero"
             value={post.cover}
             format={format}
             disabled={!canEdit}
@@ -91,7 +92,7 @@ export function PostPanel({ view, actions, post }: PanelProps & { post: Post }) 
         </div>
       )}
       <div className="grid grid-cols-2 gap-3">
-        <LengthField
+        <MeasureField
           label="Size along"
           hint="parallel to its first bay"
           value={post.along}
@@ -99,7 +100,7 @@ export function PostPanel({ view, actions, post }: PanelProps & { post: Post }) 
           disabled={!canEdit}
           onChange={(along) => set({ along })}
         />
-        <LengthField
+        <MeasureField
           label="Size across"
           hint="at right angles"
           value={post.across}

@@ -5,11 +5,11 @@ import { inches } from '@shared/units/length'
 import { Button } from '@/components/button'
 import { ChoiceGroup } from '@/components/choices'
 import { SelectField, TextField } from '@/components/field'
-import { LengthField } from '@/components/length-field'
 import { sayDone } from '@/components/toast'
 import { formatOf } from './format-of'
 import { HeightsField } from './heights-field'
 import { Readings } from './readings'
+import { MeasureField } from './measure-field'
 import type { PanelProps } from './selection-panel'
 
 const layouts = [
@@ -53,7 +53,7 @@ export function RunPanel({ view, actions, run }: PanelProps & { run: Run }) {
         onChange={(layout) => set(layout === 'heights' ? { heights: [spacing] } : { layout, spacing })}
       />
       {'layout' in run.cables ? (
-        <LengthField
+        <MeasureField
           label="Spacing at most, square to the cable"
           required
           value={run.cables.spacing}

@@ -5,8 +5,8 @@ import type { Length } from '@shared/units/length'
 import { ChoiceGroup } from '@/components/choices'
 import { FindingItem } from '@/components/finding-mark'
 import { TextField } from '@/components/field'
-import { LengthField } from '@/components/length-field'
 import { formatOf } from './format-of'
+import { MeasureField } from './measure-field'
 import type { PanelProps } from './selection-panel'
 
 const tapes = [
@@ -31,14 +31,14 @@ export function StairFields({ view, actions, bay }: PanelProps & { bay: Bay }) {
   return (
     <div className="flex flex-col gap-3">
       <div className="grid grid-cols-3 gap-3">
-        <LengthField
+        <MeasureField
           label="Rise"
           value={bay.rise}
           format={format}
           disabled={!canEdit}
           onChange={(value) => keep('rise', value)}
         />
-        <LengthField
+        <MeasureField
           label="Going"
           value={bay.going}
           format={format}

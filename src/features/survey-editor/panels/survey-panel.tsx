@@ -3,14 +3,17 @@ import type { Survey } from '@shared/schemas/survey'
 import type { Length } from '@shared/units/length'
 import { ChoiceGroup } from '@/components/choices'
 import { TextField } from '@/components/field'
-import { LengthField } from '@/components/length-field'
 import { formatOf } from './format-of'
+import { MeasureField } from './measure-field'
 import type { PanelProps } from './selection-panel'
 
 const units = [
   { value: 'in', label: 'Inches and pounds-force' },
   { value: 'mm', label: 'Millimetres and newtons' },
 ] as const
+
+/** Heights that may lie on the walking surface itself. */
+const fromZero: ReadonlySet<string> = new Set(['Opening begins at', 'Top readings at', 'Bottom readings at'])
 
 /** The survey as a whole: its title, its units, and the guard it describes. */
 export function SurveyPanel({ view, actions }: PanelProps) {
@@ -21,8 +24,9 @@ export function SurveyPanel({ view, actions }: PanelProps) {
   const setGuard = (fields: Partial<Guard>) => actions.perform({ type: 'guard.set', set: fields, unset: [] })
   /** A guard's height that is always there. */
   const height = (label: string, value: Length, keep: (value: Length) => Partial<Guard>) => (
-    <LengthField
+    <MeasureField
       label={label}
+      least={fromZero.has(label) ? 'zero' : 'above-zero'}
       required
       value={value}
       format={formatOf(view)}
@@ -55,7 +59,7 @@ export function SurveyPanel({ view, actions }: PanelProps) {
       <fieldset className="grid grid-cols-2 gap-3" disabled={!canEdit}>
         <legend className="mb-2 text-lg font-semibold">Guard</legend>
         {height('Height', guard.height, (given) => ({ height: given }))}
-        <LengthField
+        <MeasureField
           label="Top rail underside"
           value={guard.topRailUnderside}
           format={formatOf(view)}
@@ -98,8 +102,9 @@ function StairGuard({ view, actions }: PanelProps) {
     })
   }
   const field = (key: 'height' | 'topRailUnderside' | 'bottom', label: string) => (
-    <LengthField
+    <MeasureField
       label={label}
+      least={key === 'bottom' ? 'zero' : 'above-zero'}
       value={stair?.[key]}
       format={formatOf(view)}
       disabled={!view.canEdit}

@@ -22,6 +22,16 @@ const fields: Record<string, string> = {
   cable: 'cable',
   tension: 'tension',
   cables: 'layout of the cables',
+  height: 'height',
+  topRailUnderside: 'top rail underside',
+  bottom: 'where the opening begins',
+  sphere: 'sphere that must not pass',
+  stairSphere: 'sphere that must not pass on stairs',
+  readAt: 'heights of the readings',
+  stair: 'heights on stairs',
+  rules: 'rules followed',
+  title: 'title',
+  units: 'units',
 }
 
 const changed = ({ set, unset }: { set: object; unset: readonly string[] }): string =>

@@ -1,10 +1,11 @@
 import type { Length } from '@shared/units/length'
 import { parseLength } from '@shared/units/parse-length'
 import type { EditorView } from '../model/editor-context'
+import { type Least, lengthFault } from '../panels/length-bounds'
 
 /** Reads a cell's text as a length and hands it on; an emptied cell hands on nothing. Answers what was not understood. */
 export const lengthCommit =
-  ({ units }: Pick<EditorView, 'units'>, keep: (value: Length | undefined) => void) =>
+  ({ units }: Pick<EditorView, 'units'>, keep: (value: Length | undefined) => void, least?: Least) =>
   (text: string): string | undefined => {
     if (text === '') {
       keep(undefined)
@@ -12,8 +13,9 @@ export const lengthCommit =
     }
     const parsed = parseLength(text, { default: units.length })
     if (!parsed.ok) return parsed.message
-    keep(parsed.length)
-    return undefined
+    const fault = lengthFault(parsed.length, least)
+    if (fault === undefined) keep(parsed.length)
+    return fault
   }
 
 /** Reads a cell's text as a number within bounds. */

@@ -1,5 +1,6 @@
 import type { Length } from '@shared/units/length'
 import { parseLength } from '@shared/units/parse-length'
+import { lengthFault } from '../panels/length-bounds'
 
 /** One pasted line and the row it is for. */
 export interface PastedLine {
@@ -23,6 +24,8 @@ export function readPasted(
     const row = rows[i]
     if (row === undefined) return [{ row: '', text, fault: 'There is no row left for this line.' }]
     const parsed = parseLength(text, { default: house })
-    return [parsed.ok ? { row, text, length: parsed.length } : { row, text, fault: parsed.message }]
+    if (!parsed.ok) return [{ row, text, fault: parsed.message }]
+    const fault = lengthFault(parsed.length)
+    return [fault === undefined ? { row, text, length: parsed.length } : { row, text, fault }]
   })
 }

@@ -36,7 +36,11 @@ export function PostsTable({
       label={`${label} of ${post.id}`}
       value={post[key] === undefined ? '' : writeLength(post[key], formatOf(view))}
       readOnly={!canEdit}
-      onCommit={lengthCommit(view, (value) => set(post.id, key, value))}
+      onCommit={lengthCommit(
+        view,
+        (value) => set(post.id, key, value),
+        key === 'cover' ? 'zero' : 'above-zero',
+      )}
       onPasteLines={(lines) => onPaste(key, post.id, lines)}
     />
   )

@@ -5,6 +5,7 @@ import type { LengthFormat } from '@shared/units/format-length'
 import { Button } from '@/components/button'
 import { classes } from '@/components/classes'
 import { Length } from '@/components/length'
+import { lengthFault } from '../length-bounds'
 import { type Entry, entryText, type Key, press, readEntry } from './entry'
 
 interface KeypadProps {
@@ -29,9 +30,10 @@ export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, 
   const id = useId()
   const isMetric = format.style === 'millimetres'
   const parsed = readEntry(entry, isMetric ? 'mm' : 'in')
+  const fault = parsed && (parsed.ok ? lengthFault(parsed.length) : parsed.message)
   const hit = (pressed: Key) => onEntry(press(entry, pressed))
   const enter = () => {
-    if (parsed?.ok) onEnter(parsed.length)
+    if (parsed?.ok && !fault) onEnter(parsed.length)
   }
   return (
     <div className="flex flex-col gap-2">
@@ -45,16 +47,16 @@ export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, 
           )}
         </div>
       </div>
-      {parsed && !parsed.ok ? (
+      {fault ? (
         <p id={`${id}-fault`} role="alert" className="text-sm text-stop">
-          {parsed.message}
+          {fault}
         </p>
       ) : null}
       <div className="flex gap-2">
         <input
           aria-label="Length as written on the tape"
-          aria-describedby={parsed && !parsed.ok ? `${id}-fault` : undefined}
-          aria-invalid={parsed ? !parsed.ok : undefined}
+          aria-describedby={fault ? `${id}-fault` : undefined}
+          aria-invalid={parsed ? fault !== undefined : undefined}
           className="figures min-h-12 min-w-0 flex-1 rounded border border-rule bg-card px-3 text-lg"
           // The keys below are the keyboard of a phone; a real one types here all the same.
           inputMode="none"
@@ -65,7 +67,7 @@ export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, 
             if (event.key === 'Enter') enter()
           }}
         />
-        <Button look="primary" disabled={!parsed?.ok} onClick={enter}>
+        <Button look="primary" disabled={!parsed?.ok || fault !== undefined} onClick={enter}>
           {enterLabel}
         </Button>
       </div>

@@ -33,6 +33,13 @@ describe('describeOperation', () => {
     ).toBe('changed post P1: material, cover')
   })
 
+  it('names what changed of the guard in words', () => {
+    const set = { topRailUnderside: inches(34.5), stairSphere: inches(4) }
+    expect(describeOperation({ type: 'guard.set', set, unset: ['stair'] }, format)).toBe(
+      'changed the guard: top rail underside, sphere that must not pass on stairs, heights on stairs',
+    )
+  })
+
   it('has a sentence for every kind of change', () => {
     const example = {
       id: 'X1',
