@@ -44,7 +44,9 @@ export function CatalogueList<Line extends CatalogueLine>(props: CatalogueListPr
     { key: 'name', header: 'Name', cell: name },
     { key: 'id', header: 'Id', cell: ({ id }) => id },
     ...columns,
-    ...(onRetire ? [{ key: 'retire', header: <span className="sr-only">Offered</span>, figures: true, cell: retire }] : []),
+    ...(onRetire
+      ? [{ key: 'retire', header: <span className="sr-only">Offered</span>, figures: true, cell: retire }]
+      : []),
   ]
   return (
     <>

@@ -2,7 +2,8 @@ import type { HouseRules } from '@shared/schemas/house-rules'
 import { Card } from '@/components/page'
 import { FactList } from './fact-list'
 import { ruleGroups } from './rule-list'
-import { type HouseUnits, ruleText } from './rule-values'
+import { RuleValue } from './rule-value'
+import type { HouseUnits } from './rule-values'
 
 /** The house rules for those who may not change them. */
 export const HouseRulesFacts = ({ rules, units }: { rules: HouseRules; units: HouseUnits }) => (
@@ -12,7 +13,7 @@ export const HouseRulesFacts = ({ rules, units }: { rules: HouseRules; units: Ho
         <FactList
           facts={group.map((rule) => ({
             label: rule.label,
-            value: ruleText(rule, rules, units),
+            value: <RuleValue rule={rule} rules={rules} units={units} />,
             meaning: rule.meaning,
           }))}
         />

@@ -34,11 +34,6 @@ export function HouseRulesForm({ rules: saved, units }: HouseRulesFormProps) {
       busy={isPending}
       error={error}
       onSave={() => mutate(rules, { onSuccess: () => sayDone('The house rules are saved.') })}
-      actions={
-        <Button look="quiet" onClick={startAgain}>
-          Put all starting values in
-        </Button>
-      }
     >
       {ruleGroups.map(({ title, rules: group }) => (
         <Card key={title} title={title}>
@@ -56,6 +51,9 @@ export function HouseRulesForm({ rules: saved, units }: HouseRulesFormProps) {
           </div>
         </Card>
       ))}
+      <Button className="self-start" onClick={startAgain}>
+        Put all starting values in
+      </Button>
     </SafeForm>
   )
 }

@@ -3,6 +3,7 @@ import { starterRules } from '@shared/calculation/starter-rules'
 import type { HouseRules } from '@shared/schemas/house-rules'
 import { Button } from '@/components/button'
 import { RuleControl, type RuleControlProps } from './rule-control'
+import { RuleValue } from './rule-value'
 import { isStarting, ruleText } from './rule-values'
 
 /** A rule to change, with what it was in the beginning and a way back there. */
@@ -17,7 +18,7 @@ export function RuleField(props: RuleControlProps) {
       <RuleControl key={begun} {...props} />
       <div className="flex min-h-12 flex-wrap items-center gap-x-3 text-sm text-soft">
         <span>
-          Starting value <span className="figures">{starting}</span>
+          Starting value <RuleValue rule={rule} rules={starterRules} units={units} />
         </span>
         {isStarting(rule, rules, starterRules) ? null : (
           <Button

@@ -9,12 +9,15 @@ interface SafeFormProps {
   error: unknown
   saveLabel: string
   children: ReactNode
-  /** Other things to do, beside the button that saves. */
-  actions?: ReactNode
 }
 
+/** Under the thumb on a phone, above the way between pages; at the foot of the window on a desk. */
+const bar =
+  'sticky bottom-[calc(3.5rem+env(safe-area-inset-bottom))] z-10 -mx-4 flex flex-wrap gap-2 border-t border-rule ' +
+  'bg-paper px-4 py-3 md:bottom-0 md:mx-0 md:px-0'
+
 /** A form that never saves past what it could not read, and goes to the first field that needs another look. */
-export function SafeForm({ onSave, busy, error, saveLabel, children, actions }: SafeFormProps) {
+export function SafeForm({ onSave, busy, error, saveLabel, children }: SafeFormProps) {
   const form = useRef<HTMLFormElement>(null)
   useEffect(() => {
     if (error) form.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus()
@@ -22,7 +25,8 @@ export function SafeForm({ onSave, busy, error, saveLabel, children, actions }: 
   return (
     <form
       ref={form}
-      className="flex flex-col gap-5"
+      // A field that the keyboard reaches must not hide behind the bar below.
+      className="flex flex-col gap-5 [&_:is(input,button)]:scroll-mb-40"
       onSubmit={(event) => {
         event.preventDefault()
         const unread = event.currentTarget.querySelector<HTMLElement>('[data-unread]')
@@ -32,11 +36,10 @@ export function SafeForm({ onSave, busy, error, saveLabel, children, actions }: 
     >
       {error ? <ErrorNote message={whyNotSaved(error)} /> : null}
       {children}
-      <div className="flex flex-wrap gap-2">
-        <Button type="submit" look="primary" busy={busy} className="max-md:w-full">
+      <div className={bar}>
+        <Button type="submit" look="primary" busy={busy} className="max-md:grow">
           {saveLabel}
         </Button>
-        {actions}
       </div>
     </form>
   )
