@@ -3,6 +3,7 @@ import { parseLength } from '@shared/units/parse-length'
 import type { Length as LengthValue } from '@shared/units/length'
 import { type LengthFormat, writeLength } from '@shared/units/format-length'
 import { controlClasses, Field } from './field'
+import { Length } from './length'
 
 interface LengthFieldProps {
   label: string
@@ -19,7 +20,7 @@ interface LengthFieldProps {
 const written = (value: LengthValue | undefined, format: LengthFormat): string =>
   value === undefined ? '' : writeLength(value, format)
 
-/** A length as people write it; says at once what it did not understand and keeps what was written. */
+/** A length as people write it; says at once what it understood, or did not, and keeps what was written. */
 export function LengthField({
   label,
   value,
@@ -34,6 +35,11 @@ export function LengthField({
   const house = format.style === 'millimetres' ? 'mm' : 'in'
   const parsed = text === null || text.trim() === '' ? undefined : parseLength(text, { default: house })
   const fault = parsed && !parsed.ok ? parsed.message : undefined
+  const understood = parsed?.ok ? (
+    <>
+      Understood: <Length value={parsed.length} format={format} />
+    </>
+  ) : undefined
   const commit = () => {
     if (text === null || fault) return
     if (text.trim() === '') {
@@ -42,7 +48,7 @@ export function LengthField({
     setText(null)
   }
   return (
-    <Field label={label} hint={hint} error={fault ?? error}>
+    <Field label={label} hint={understood ?? hint} error={fault ?? error}>
       {(control) => (
         <input
           {...control}
