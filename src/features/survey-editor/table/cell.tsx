@@ -44,8 +44,8 @@ export function Cell({ label, value, onCommit, readOnly = false, onPasteLines }:
         title={fault}
         readOnly={readOnly}
         className={classes(
-          'figures min-h-11 w-full min-w-20 rounded border bg-card px-2',
-          fault ? 'border-stop' : 'border-transparent focus:border-chalk',
+          'figures min-h-12 w-full min-w-20 rounded border bg-card px-2',
+          fault ? 'border-stop' : readOnly ? 'border-transparent' : 'border-rule focus:border-chalk',
         )}
         value={text ?? value}
         onChange={(event) => setText(event.target.value)}

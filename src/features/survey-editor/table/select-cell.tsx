@@ -10,7 +10,7 @@ export function SelectCell({ label, value, choices, onChange, disabled }: Select
   return (
     <select
       aria-label={label}
-      className="min-h-11 w-full min-w-24 rounded border border-transparent bg-card px-1 focus:border-chalk disabled:opacity-100"
+      className="min-h-12 w-full min-w-24 rounded border border-rule bg-card px-1 focus:border-chalk disabled:border-transparent disabled:opacity-100"
       value={value}
       disabled={disabled}
       onChange={(event) => onChange(event.target.value)}
