@@ -31,10 +31,8 @@ const now = new Date('2026-12-01T09:00:00.000Z')
 const seed = () => seedDemo({ database: test.database, photoStorage, clock: () => now, folder })
 
 describe('the demo company', () => {
-  it('is loaded within five seconds, once', async () => {
-    const start = performance.now()
+  it('is loaded once', async () => {
     expect(await seed()).toBe(true)
-    expect(performance.now() - start).toBeLessThan(5000)
     expect(await seed()).toBe(false)
     expect(await test.database.select().from(companies)).toHaveLength(1)
     expect(photoStorage.keys()).toHaveLength(6)
