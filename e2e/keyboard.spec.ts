@@ -84,6 +84,10 @@ test('@desk types a survey into the tables, pastes a column and reads its cut li
   await page.getByRole('button', { name: 'Take over 2 of 2' }).click()
   await page.getByLabel('Add a bottom reading to B1').fill('46 1/4')
   await page.getByLabel('Add a bottom reading to B1').press('Enter')
+  // One reading, not two: Enter keeps it and leaving the cell keeps nothing more.
+  await page.getByRole('button', { name: 'Readings of B1' }).click()
+  await expect(page.getByRole('list', { name: 'Readings' }).getByRole('listitem')).toHaveCount(2)
+  await page.keyboard.press('Escape')
   await expect(page.getByText('Saved')).toBeVisible()
 
   await page.getByRole('button', { name: 'Cut list' }).click()

@@ -19,7 +19,9 @@ export interface QueueState {
 
 export type QueueEvent =
   | { type: 'performed'; change: SurveyChange }
-  | { type: 'sending' }
+  | { type: 'sending'; count: number }
+  /** Not taken, for one of them; each is to be tried by itself. */
+  | { type: 'held' }
   | { type: 'accepted'; revision: number }
   | { type: 'unreachable' }
   /** The server's survey read again, and which changes it has seen already. */
@@ -58,7 +60,9 @@ export function step(state: QueueState, event: QueueEvent): Stepped {
       })
     }
     case 'sending':
-      return kept({ ...state, sending: Math.min(BATCH, state.pending.length), waiting: false })
+      return kept({ ...state, sending: Math.min(event.count, state.pending.length), waiting: false })
+    case 'held':
+      return kept({ ...state, sending: 0 })
     case 'accepted': {
       const sent = state.pending.slice(0, state.sending)
       return kept({

@@ -28,6 +28,8 @@ export class ChangeQueue {
   private timer: ReturnType<typeof setTimeout> | undefined
   /** The lasting trouble that was told already; it is not told again with every try. */
   private told = ''
+  /** One by one after a refusal, so that only what the server will not have is given up. */
+  private batch = BATCH
 
   constructor(
     { survey, revision }: { survey: Survey; revision: number },
@@ -66,8 +68,8 @@ export class ChangeQueue {
 
   private async sendAll(): Promise<void> {
     while (this.state.pending.length > 0) {
-      const changes = this.state.pending.slice(0, BATCH)
-      this.take({ type: 'sending' })
+      const changes = this.state.pending.slice(0, this.batch)
+      this.take({ type: 'sending', count: this.batch })
       try {
         const { revision } = await this.deps.send({ revision: this.state.revision, changes })
         this.take({ type: 'accepted', revision })
@@ -76,6 +78,7 @@ export class ChangeQueue {
         if (!(await this.recover(error))) return
       }
     }
+    this.batch = BATCH
   }
 
   /** Whether sending may go on. */
@@ -88,6 +91,11 @@ export class ChangeQueue {
         this.deps.onTrouble(`${refusal.message} ${this.count()} kept on this screen.`)
       this.told = refusal.code
       return this.wait()
+    }
+    if (refusal.code !== 'survey-moved' && this.state.sending > 1) {
+      this.batch = 1
+      this.take({ type: 'held' })
+      return true
     }
     try {
       const now = await this.deps.reread(this.state.revision)

@@ -28,7 +28,7 @@ const cores: readonly { value: Core; label: string }[] = [
 ]
 
 /** Sets fields of a post; an undefined one is taken away. */
-function change(id: string, fields: Partial<Fields>): OperationOf<'post.set'> {
+export function change(id: string, fields: Partial<Fields>): OperationOf<'post.set'> {
   const given = Object.entries(fields)
   return {
     type: 'post.set',
@@ -38,13 +38,16 @@ function change(id: string, fields: Partial<Fields>): OperationOf<'post.set'> {
   }
 }
 
+/** A material with what goes with it: only a veneered post has a core and a cover of its own. */
+export const materialFields = (material: Material | undefined): Partial<Fields> =>
+  material === 'veneered' ? { material } : { material, core: undefined, cover: undefined }
+
 /** One post: what it is made of, its sizes, and its corner where two runs meet. */
 export function PostPanel({ view, actions, post }: PanelProps & { post: Post }) {
   const { survey, canEdit } = view
   const format = formatOf(view)
   const set = (fields: Partial<Fields>) => actions.perform(change(post.id, fields))
-  const setMaterial = (material: Material) =>
-    set(material === 'veneered' ? { material } : { material, core: undefined, cover: undefined })
+  const setMaterial = (material: Material) => set(materialFields(material))
   const remove = () => {
     actions.perform(removePosts(survey, [post.id]))
     sayDone(`Post ${post.id} removed, with its bays and marks.`, actions.undo)
@@ -136,9 +139,15 @@ function SameForOthers({ view, actions, post }: PanelProps & { post: Post }) {
   const others = view.survey.posts.filter(({ id, material }) => id !== post.id && material === undefined)
   if (!post.material || others.length === 0) return null
   const { material, core, cover, along, across } = post
-  const fields = { material, core, cover, along, across }
+  /** What was measured at a post itself stays. */
+  const missingIn = (other: Post) =>
+    Object.fromEntries(
+      Object.entries({ material, core, cover, along, across }).filter(
+        ([key, value]) => value !== undefined && other[key as keyof Fields] === undefined,
+      ),
+    )
   const apply = () => {
-    actions.perform({ type: 'group', operations: others.map(({ id }) => change(id, fields)) })
+    actions.perform({ type: 'group', operations: others.map((other) => change(other.id, missingIn(other))) })
     sayDone(`${others.map(({ id }) => id).join(', ')} made like ${post.id}.`, actions.undo)
   }
   return (

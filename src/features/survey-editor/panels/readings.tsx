@@ -35,15 +35,14 @@ export function Readings({ view, actions, of, readings, onComplete }: ReadingsPr
   const format = formatOf(view)
   const doubts = readingDoubts(readings, view)
   const add = (value: Parameters<typeof newReading>[0]['value']) => {
-    actions.perform({
-      type: 'reading.add',
-      of,
-      reading: newReading({ at: place, value, by: view.person.name }),
-    })
+    const reading = newReading({ at: place, value, by: view.person.name })
+    actions.perform({ type: 'reading.add', of, reading })
     setEntry(emptyEntry)
     const other = place === 'top' ? 'bottom' : 'top'
-    if (meanOfReadings(readings, other)) onComplete?.()
-    else setPlace(other)
+    const isNew = !meanOfReadings(readings, place)
+    if (!meanOfReadings(readings, other)) setPlace(other)
+    // A doubt that this reading raised is to be seen before going on.
+    else if (isNew && readingDoubts([...readings, reading], view).length === 0) onComplete?.()
   }
   return (
     <div className="flex flex-col gap-3">

@@ -1,4 +1,4 @@
-import { useState } from 'react'
+import { useRef, useState } from 'react'
 import { classes } from '@/components/classes'
 
 interface CellProps {
@@ -25,15 +25,22 @@ function moveFocus(from: HTMLElement, rows: number): void {
 export function Cell({ label, value, onCommit, readOnly = false, onPasteLines }: CellProps) {
   const [text, setText] = useState<string | null>(null)
   const [fault, setFault] = useState<string>()
+  // Enter commits and moves on, and leaving the cell commits too: what was kept once must not be kept twice.
+  const pending = useRef<string | null>(null)
+  const write = (written: string | null) => {
+    pending.current = written
+    setText(written)
+  }
   const commit = (): boolean => {
+    const text = pending.current
     if (text === null || text.trim() === value) {
-      setText(null)
+      write(null)
       setFault(undefined)
       return true
     }
     const wrong = onCommit(text.trim())
     setFault(wrong)
-    if (wrong === undefined) setText(null)
+    if (wrong === undefined) write(null)
     return wrong === undefined
   }
   return (
@@ -48,7 +55,7 @@ export function Cell({ label, value, onCommit, readOnly = false, onPasteLines }:
           fault ? 'border-stop' : readOnly ? 'border-transparent' : 'border-rule focus:border-chalk',
         )}
         value={text ?? value}
-        onChange={(event) => setText(event.target.value)}
+        onChange={(event) => write(event.target.value)}
         onFocus={(event) => event.target.select()}
         onBlur={commit}
         onPaste={(event) => {
@@ -60,7 +67,7 @@ export function Cell({ label, value, onCommit, readOnly = false, onPasteLines }:
         onKeyDown={(event) => {
           if (event.key === 'Enter' && commit()) moveFocus(event.currentTarget, 1)
           if (event.key === 'Escape') {
-            setText(null)
+            write(null)
             setFault(undefined)
           }
           if (event.key === 'ArrowDown') moveFocus(event.currentTarget, 1)

@@ -4,6 +4,7 @@ import { writeLength } from '@shared/units/format-length'
 import { Button } from '@/components/button'
 import { sayDone } from '@/components/toast'
 import { formatOf } from '../panels/format-of'
+import { change as changePost, materialFields } from '../panels/post-panel'
 import type { PanelProps } from '../panels/selection-panel'
 import { lengthCommit } from './length-commit'
 import { Cell } from './cell'
@@ -61,7 +62,11 @@ export function PostsTable({
               value={post.material ?? ''}
               choices={choices}
               disabled={!canEdit}
-              onChange={(value) => set(post.id, 'material', value)}
+              onChange={(value) =>
+                actions.perform(
+                  changePost(post.id, materialFields(materials.find((known) => known === value))),
+                )
+              }
             />
           </td>
           <td>

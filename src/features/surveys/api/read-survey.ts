@@ -12,5 +12,7 @@ export const surveyQuery = (surveyId: string) =>
     queryFn: ({ signal }) => readSurvey(surveyId, signal),
     // An editor holds its own copy and asks when it must; a page that is opened asks afresh.
     staleTime: 0,
+    // Nothing is kept for the next page: it must not begin on a survey that has been changed since.
+    gcTime: 0,
     refetchOnWindowFocus: false,
   })

@@ -142,11 +142,16 @@ describe('ChangeQueue', () => {
     const { queue, onTrouble } = queueOn(server)
     queue.perform(post('P1'))
     await queue.settled()
-    queue.perform({ type: 'survey.set', set: { title: 'Porch' }, unset: [] })
+    server.reachable = false
     queue.perform(post('P2'))
+    queue.perform({ type: 'survey.set', set: { title: 'Porch' }, unset: [] })
+    queue.perform(post('P3'))
+    await queue.settled()
+    server.reachable = true
+    queue.flush()
     await queue.settled()
     expect(onTrouble).toHaveBeenCalledWith(expect.stringContaining('The title cannot be that.'))
-    expect(ids(server.survey)).toEqual(['P1', 'P2'])
+    expect(ids(server.survey)).toEqual(['P1', 'P2', 'P3'])
     expect(queue.getSnapshot().shown).toEqual(server.survey)
   })
 

@@ -27,13 +27,14 @@ export function press(entry: Entry, key: Key): Entry {
   const { body, thirtySeconds } = entry
   switch (key.key) {
     case 'digit':
-      return { ...entry, body: body + key.digit }
+      // After a fraction or a unit that was typed, a key begins anew.
+      return { ...entry, body: /[/⁄a-z"]|[¼-¾⅐-⅞]/i.test(body) ? key.digit : body + key.digit }
     case 'point':
       return body.includes('.') ? entry : { ...entry, body: `${body === '' ? '0' : body}.` }
     case 'feet':
       return /^\d+$/.test(body) ? { ...entry, body: body + FEET } : entry
     case 'sixteenths':
-      return { ...entry, thirtySeconds: key.count === 0 ? null : key.count * 2 }
+      return { ...entry, thirtySeconds: key.count === 0 ? null : key.count * 2 + ((thirtySeconds ?? 0) % 2) }
     case 'half-sixteenth': {
       const now = thirtySeconds ?? 0
       const turned = now % 2 === 0 ? now + 1 : now - 1

@@ -28,6 +28,8 @@ describe('the keypad', () => {
     expect(entryText(press(entry, half))).toBe('46 3/16')
     expect(entryText(entered(half))).toBe('1/32')
     expect(entered(half, half)).toEqual(emptyEntry)
+    expect(entryText(entered(half, { key: 'sixteenths', count: 6 }))).toBe('13/32')
+    expect(entryText(entered({ key: 'written', text: '46 1/2' }, { key: 'digit', digit: '5' }))).toBe('5')
   })
 
   it('takes back the fraction first, then key by key', () => {
