@@ -1,6 +1,6 @@
 import { X } from 'lucide-react'
 import { Dialog } from 'radix-ui'
-import type { ReactNode } from 'react'
+import { type ReactNode, useRef } from 'react'
 import { IconButton } from './button'
 import { classes } from './classes'
 
@@ -22,12 +22,22 @@ const places = {
 
 /** A sheet laid over the page; Escape and the cross put it away. */
 export function Sheet({ open, onOpenChange, title, description, children, place = 'side' }: SheetProps) {
+  // Sheets are opened from anywhere, so the dialog knows no button of its own to go back to.
+  const cameFrom = useRef<Element | null>(null)
   return (
     <Dialog.Root open={open} onOpenChange={onOpenChange}>
       <Dialog.Portal>
         <Dialog.Overlay className="fixed inset-0 z-40 bg-shade" />
         <Dialog.Content
           {...(description ? {} : { 'aria-describedby': undefined })}
+          onOpenAutoFocus={() => {
+            cameFrom.current = document.activeElement
+          }}
+          onCloseAutoFocus={(event) => {
+            if (!(cameFrom.current instanceof HTMLElement) || !cameFrom.current.isConnected) return
+            event.preventDefault()
+            cameFrom.current.focus()
+          }}
           className={classes(
             'fixed z-50 flex flex-col overflow-y-auto border border-rule bg-card shadow-float',
             'motion-safe:animate-[rise_0.15s_ease-out]',

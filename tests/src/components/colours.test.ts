@@ -97,3 +97,10 @@ test('no colour stands anywhere but in the stylesheet', () => {
   )
   expect(found).toEqual([])
 })
+
+test('nothing that prints is in a layer, where the tokens of the screen would win', () => {
+  const layers = styles.slice(styles.indexOf('@layer'))
+  expect(styles.indexOf('@media print')).toBeGreaterThan(styles.lastIndexOf("[data-theme='dark']"))
+  expect(styles.indexOf('@media print')).toBeLessThan(styles.indexOf('@layer'))
+  expect(layers).not.toMatch(/^\s+--(paper|card|ink|spruce|rule)/m)
+})
