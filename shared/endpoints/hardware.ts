@@ -6,7 +6,9 @@ import {
   catalogueSchema,
   fittingSchema,
   houseRulesSchema,
+  ownGuardRulesSchema,
 } from '../schemas/catalogue'
+import { guardRulesSchema } from '../schemas/guard-rules'
 import { keySchema } from '../schemas/id'
 import { endpoint } from './endpoint'
 
@@ -81,6 +83,44 @@ export const hardware = {
     params: entry,
     body: retired,
     response: catalogueFittingSchema,
+  }),
+  listGuardRules: endpoint({
+    id: 'guard-rules.list',
+    method: 'GET',
+    path: '/api/guard-rules',
+    gate: 'guard-rules:read',
+    summary: 'The company’s own guard rules, retired ones too; published ones are built in.',
+    response: z.array(ownGuardRulesSchema),
+  }),
+  addGuardRules: endpoint({
+    id: 'guard-rules.add',
+    method: 'POST',
+    path: '/api/guard-rules',
+    gate: 'guard-rules:edit',
+    summary: 'Add own guard rules, such as a copy of published ones.',
+    body: guardRulesSchema,
+    response: ownGuardRulesSchema,
+    status: 201,
+  }),
+  changeGuardRules: endpoint({
+    id: 'guard-rules.change',
+    method: 'PUT',
+    path: '/api/guard-rules/:key',
+    gate: 'guard-rules:edit',
+    summary: 'Change own guard rules; their id stays.',
+    params: entry,
+    body: guardRulesSchema,
+    response: ownGuardRulesSchema,
+  }),
+  retireGuardRules: endpoint({
+    id: 'guard-rules.retire',
+    method: 'PATCH',
+    path: '/api/guard-rules/:key',
+    gate: 'guard-rules:edit',
+    summary: 'Retire own guard rules, or offer them again.',
+    params: entry,
+    body: retired,
+    response: ownGuardRulesSchema,
   }),
   readHouseRules: endpoint({
     id: 'house-rules.read',

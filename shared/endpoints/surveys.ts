@@ -137,6 +137,15 @@ export const surveys = {
     params: survey,
     file: 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet',
   }),
+  exportGuardSummary: endpoint({
+    id: 'guard-summary.pdf',
+    method: 'GET',
+    path: '/api/surveys/:surveyId/guard-summary.pdf',
+    gate: 'survey:read',
+    summary: 'One page for the inspector: heights, openings, spacing, cables, loads, assumptions, cautions.',
+    params: survey,
+    file: 'application/pdf',
+  }),
   exportCsv: endpoint({
     id: 'cut-list.csv',
     method: 'GET',

@@ -18,6 +18,10 @@ const allowed = {
   'survey:read': everyone,
   'survey:edit': field,
   'survey:remove': office,
+  /** Let a *stop* pass, with a reason. */
+  'finding:overrule': office,
+  'guard-rules:read': everyone,
+  'guard-rules:edit': owner,
   'cut-list:read': everyone,
   'hardware:read': everyone,
   'hardware:edit': owner,

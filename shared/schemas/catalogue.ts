@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { guardRulesSchema } from './guard-rules'
 import { makeCableSchema, makeFittingSchema } from './hardware'
 import { makeHouseRulesSchema } from './house-rules'
 import { keySchema } from './id'
@@ -16,6 +17,9 @@ export const catalogueSchema = z.object({
   cables: z.array(catalogueCableSchema),
   fittings: z.array(catalogueFittingSchema),
 })
+/** Guard rules of the company's own. Retired ones stay readable for old surveys. */
+export const ownGuardRulesSchema = z.object({ ...entry, rules: guardRulesSchema })
+export type OwnGuardRules = z.infer<typeof ownGuardRulesSchema>
 export type CatalogueCable = z.infer<typeof catalogueCableSchema>
 export type CatalogueFitting = z.infer<typeof catalogueFittingSchema>
 export type Catalogue = z.infer<typeof catalogueSchema>

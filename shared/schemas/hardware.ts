@@ -36,6 +36,8 @@ export const makeFittingSchema = (q: Quantities) =>
     headProjection: q.size,
     cutPastFace: q.length,
     takeUp: q.positive,
+    /** The most it may be loaded with, as its maker says. */
+    rating: q.force.optional(),
     maxAngle: z.number().min(0).max(90).default(0),
     maxRun: q.positive.optional(),
     minGrip: z.partialRecord(materialSchema, q.size).default({}),

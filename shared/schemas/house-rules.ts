@@ -1,7 +1,10 @@
 import { z } from 'zod'
+import { makeLumberSchema, startingLumber } from './lumber'
 import type { Quantities } from './quantities'
 import { poundsForce } from '../units/force'
 import { inches } from '../units/length'
+
+const temperature = z.number().min(-80).max(80)
 
 /** The company's tolerances, limits and defaults. Starting values are those of docs/calculations. Angles in degrees. */
 export const makeHouseRulesSchema = (q: Quantities) =>
@@ -27,6 +30,18 @@ export const makeHouseRulesSchema = (q: Quantities) =>
     keepOffcut: q.size.default(inches(60)),
     /** The longest run the house proposes; the fitting's own limit applies as well. */
     longestRun: q.positive.optional(),
+    /** What a hole leaves of a post's core at either side, at least. */
+    edgeWall: q.size.default(inches(1 / 2)),
+    /** The push a sphere of the guard rules' size must withstand between two cables; the US codes set none. */
+    leastPush: q.force.optional(),
+    /** Design temperatures and the one at which cables are tensioned, °C. */
+    coldest: temperature.default(-20),
+    hottest: temperature.default(40),
+    tensionedAt: temperature.default(15),
+    /** Species and grades of posts; the first stands for a post that names none. */
+    lumber: z.array(makeLumberSchema(q)).min(1).max(50).default(startingLumber),
+    /** Posts stand outdoors: the wet service factor is taken where it applies. */
+    wetService: z.boolean().default(true),
   })
 
 export type HouseRules = z.infer<ReturnType<typeof makeHouseRulesSchema>>

@@ -22,6 +22,10 @@ export const makePostSchema = (q: Quantities) =>
     cover: q.size.optional(),
     along: q.positive.optional(),
     across: q.positive.optional(),
+    /** Species and grade, an id of the house's lumber. */
+    lumber: idSchema.optional(),
+    /** Whether the top rail ties this post's top, where it differs from the guard's `railTies`. */
+    railTies: z.boolean().optional(),
     note: z.string().max(500).optional(),
   })
 

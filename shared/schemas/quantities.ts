@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { type Force, newtons, poundsForce, toPoundsForce } from '../units/force'
 import { inches, type Length, millimetres, nanometres, toInches, toMillimetres } from '../units/length'
 import { type Money, moneyFromMain, moneyToMain } from '../units/money'
+import { megapascals, psi, type Stress, toPsi } from '../units/stress'
 
 /** Longest length anything may state: 1 km. A larger figure is a slip of the finger. */
 const LONGEST = nanometres(1e12)
@@ -20,6 +21,8 @@ export interface Quantities {
   positive: z.ZodType<Length, number>
   /** A force above zero. */
   force: z.ZodType<Force, number>
+  /** A stress or modulus above zero. */
+  stress: z.ZodType<Stress, number>
   /** An amount of zero or more. */
   price: z.ZodType<Money, number>
 }
@@ -28,21 +31,23 @@ export interface Quantities {
 const branded = <Quantity extends number>(schema: z.ZodType<number, number>) =>
   schema as unknown as z.ZodType<Quantity, number>
 
-/** The program's own units: whole nanometres, newtons, minor units of money. */
+/** The program's own units: whole nanometres, newtons, newtons per square millimetre, minor units of money. */
 export const storedQuantities: Quantities = {
   length: branded<Length>(z.int().min(LONGEST_BACKWARD).max(LONGEST)),
   size: branded<Length>(z.int().min(0).max(LONGEST)),
   positive: branded<Length>(z.int().min(1).max(LONGEST)),
   force: branded<Force>(z.number().positive().max(1e12)),
+  stress: branded<Stress>(z.number().positive().max(1e9)),
   price: branded<Money>(z.int().nonnegative()),
 }
 
 interface FileUnits {
   length: { name: string; read: (value: number) => Length; write: (length: Length) => number }
   force: { name: string; read: (value: number) => Force; write: (force: Force) => number }
+  stress: { name: string; read: (value: number) => Stress; write: (stress: Stress) => number }
 }
 
-function fileQuantities({ length, force }: FileUnits): Quantities {
+function fileQuantities({ length, force, stress }: FileUnits): Quantities {
   const longest = length.write(LONGEST)
   const lengthCodec = (written: z.ZodNumber, description: string, stored: z.ZodNumber = z.int()) =>
     z.codec(written.meta({ description }), branded<Length>(stored), {
@@ -66,6 +71,15 @@ function fileQuantities({ length, force }: FileUnits): Quantities {
         .meta({ description: `force in ${force.name}` }),
       branded<Force>(z.number()),
       { decode: (value) => force.read(value), encode: (value) => force.write(value as Force) },
+    ),
+    stress: z.codec(
+      z
+        .number()
+        .positive()
+        .max(1e10)
+        .meta({ description: `stress in ${stress.name}` }),
+      branded<Stress>(z.number()),
+      { decode: (value) => stress.read(value), encode: (value) => stress.write(value as Stress) },
     ),
     price: z.codec(
       z.number().min(0).max(1e9).meta({ description: 'price in main units of money' }),
@@ -92,10 +106,24 @@ const forceUnits = {
   N: { name: 'newtons', read: newtons, write: (force: Force) => force as number },
 }
 
+/** A stress goes with the unit of length: pounds-force per square inch, or newtons per square millimetre. */
+const stressUnits = {
+  in: { name: 'psi', read: psi, write: (stress: Stress) => Number(toPsi(stress).toPrecision(15)) },
+  mm: {
+    name: 'newtons per square millimetre',
+    read: megapascals,
+    write: (stress: Stress) => stress as number,
+  },
+}
+
 export const unitsSchema = z.strictObject({ length: z.enum(['in', 'mm']), force: z.enum(['lbf', 'N']) })
 /** The units a survey file is written in. */
 export type Units = z.infer<typeof unitsSchema>
 
 /** Quantities as a survey file in these units writes them. */
 export const quantitiesIn = (units: Units): Quantities =>
-  fileQuantities({ length: lengthUnits[units.length], force: forceUnits[units.force] })
+  fileQuantities({
+    length: lengthUnits[units.length],
+    force: forceUnits[units.force],
+    stress: stressUnits[units.length],
+  })

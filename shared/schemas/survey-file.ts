@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { makeGuardRulesSchema } from './guard-rules'
 import { makeHardwareSchema } from './hardware'
 import { makeHouseRulesSchema } from './house-rules'
 import { type Quantities, quantitiesIn, storedQuantities, type Units, unitsSchema } from './quantities'
@@ -11,6 +12,8 @@ export const makeSurveyFileSchema = (q: Quantities) =>
       survey: makeSurveySchema(q),
       hardware: makeHardwareSchema(q).optional(),
       rules: makeHouseRulesSchema(q).optional(),
+      /** Own guard rules that the survey names; published ones need not be given. */
+      guardRules: z.array(makeGuardRulesSchema(q)).max(50).optional(),
     })
     .superRefine(({ survey, hardware }, context) => {
       if (!hardware) return

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { makeBaySchema } from './bay'
+import { overruleSchema } from './finding'
 import { makeGuardSchema } from './guard'
 import { idSchema } from './id'
 import { makePhotoSchema } from './photo'
@@ -30,6 +31,7 @@ export const surveyLimits = {
   diagonals: 200,
   corners: 200,
   photos: 100,
+  overruled: 200,
 } as const
 
 /** The measured description of a site, in the quantities given; every name in it must lead somewhere. */
@@ -47,6 +49,7 @@ export const makeSurveySchema = (q: Quantities) =>
       diagonals: z.array(makeDiagonalSchema(q)).max(surveyLimits.diagonals).default([]),
       corners: z.array(cornerSchema).max(surveyLimits.corners).default([]),
       photos: z.array(makePhotoSchema(q)).max(surveyLimits.photos).default([]),
+      overruled: z.array(overruleSchema).max(surveyLimits.overruled).default([]),
     })
     .superRefine((survey, context) =>
       checkSurveyReferences(survey, (path, input, message) =>

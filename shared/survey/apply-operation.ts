@@ -4,6 +4,7 @@ import { type Corner, type Survey, surveyLimits } from '../schemas/survey'
 import { checkSurveyReferences } from '../schemas/survey-references'
 import { assertNew, itemOf, placeOf, withChanged, withFields, withItem, withoutKey } from './lists'
 import { OperationRefused } from './operation-refused'
+import { overrulePlace } from './overrule'
 import type { OperationOf, ReadingOwner, SimpleOperation, SurveyOperation } from './survey-operation'
 
 /**
@@ -159,6 +160,21 @@ const handlers: Handlers = {
     withPhoto(survey, photo, (known) => ({ ...known, rectangle })),
   'photo.clearRectangle': (survey, { photo }) =>
     withPhoto(survey, photo, (known) => withoutKey(known, 'rectangle')),
+  'stop.overrule': (survey, { overrule, index }) => {
+    const place = overrulePlace(survey, overrule)
+    return {
+      ...survey,
+      overruled:
+        place === undefined
+          ? withItem(survey.overruled, overrule, index)
+          : survey.overruled.with(place, overrule),
+    }
+  },
+  'stop.uphold': (survey, stop) => {
+    const place = overrulePlace(survey, stop)
+    if (place === undefined) throw new OperationRefused('not-there', 'This stop was not overruled.')
+    return { ...survey, overruled: survey.overruled.toSpliced(place, 1) }
+  },
   'guard.set': (survey, operation) => ({ ...survey, guard: withFields(survey.guard, operation) }),
   'survey.set': (survey, operation) => withFields(survey, operation),
 }

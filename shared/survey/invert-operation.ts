@@ -4,6 +4,7 @@ import { applySteps, cornerPlace } from './apply-operation'
 import type { Reading } from '../schemas/bay'
 import { itemOf, placeOf } from './lists'
 import { OperationRefused } from './operation-refused'
+import { overrulePlace } from './overrule'
 import type { OperationOf, ReadingOwner, SimpleOperation, SurveyOperation } from './survey-operation'
 
 /**
@@ -104,6 +105,18 @@ const inverters: Inverters = {
   },
   'photo.setRectangle': (survey, { photo }) => rectangleBack(survey, photo),
   'photo.clearRectangle': (survey, { photo }) => rectangleBack(survey, photo),
+  'stop.overrule': ({ overruled }, { overrule }) => {
+    const known = overruled[overrulePlace({ overruled }, overrule) ?? -1]
+    return known
+      ? { type: 'stop.overrule', overrule: known }
+      : { type: 'stop.uphold', code: overrule.code, where: overrule.where }
+  },
+  'stop.uphold': ({ overruled }, stop) => {
+    const index = overrulePlace({ overruled }, stop)
+    const overrule = overruled[index ?? -1]
+    if (!overrule) throw new OperationRefused('not-there', 'This stop was not overruled.')
+    return { type: 'stop.overrule', overrule, index }
+  },
   'guard.set': ({ guard }, operation) => ({ type: 'guard.set', ...fieldsBack(guard, operation) }),
   'survey.set': (survey, operation) => ({ type: 'survey.set', ...fieldsBack(survey, operation) }),
 }

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { makeBaySchema, makeReadingSchema, strikeReasonSchema } from '../schemas/bay'
+import { findingPlaceSchema, findingSchema, overruleSchema } from '../schemas/finding'
 import { makeGuardSchema } from '../schemas/guard'
 import { idSchema } from '../schemas/id'
 import { makePhotoSchema, makeRectangleSchema, postMarkSchema } from '../schemas/photo'
@@ -49,6 +50,10 @@ export const simpleOperationSchema = z.discriminatedUnion('type', [
   named('photo.unmark', { photo: idSchema, post: idSchema }),
   named('photo.setRectangle', { photo: idSchema, rectangle: makeRectangleSchema(q) }),
   named('photo.clearRectangle', { photo: idSchema }),
+  /** An owner or estimator lets a *stop* pass, with a reason. */
+  named('stop.overrule', { overrule: overruleSchema, index }),
+  /** The opposite: the stop stands again. */
+  named('stop.uphold', { code: findingSchema.shape.code, where: findingPlaceSchema }),
   named('guard.set', fieldChanges(makeGuardSchema(q).shape)),
   named('survey.set', fieldChanges({ title: surveyTitleSchema, units: unitsSchema })),
 ])

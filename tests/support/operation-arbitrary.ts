@@ -74,7 +74,16 @@ const makers: Record<Exclude<Kind, 'group'>, Make> = {
   'post.set': (survey) =>
     record('post.set', {
       id: one(idsOf(survey.posts)),
-      ...changes(any.postFields, ['material', 'core', 'cover', 'along', 'across', 'note']),
+      ...changes(any.postFields, [
+        'material',
+        'core',
+        'cover',
+        'along',
+        'across',
+        'lumber',
+        'railTies',
+        'note',
+      ]),
     }),
   'bay.add': (survey) => record('bay.add', { bay: pair(survey) && newBay(survey, 'new'), index }),
   'bay.remove': (survey) => record('bay.remove', { id: one(freeBays(survey)) }),
@@ -143,7 +152,25 @@ const makers: Record<Exclude<Kind, 'group'>, Make> = {
   'photo.setRectangle': (survey) =>
     record('photo.setRectangle', { photo: one(idsOf(survey.photos)), rectangle: any.rectangle }),
   'photo.clearRectangle': (survey) => record('photo.clearRectangle', { photo: one(idsOf(survey.photos)) }),
-  'guard.set': () => record('guard.set', changes(any.guardFields, ['topRailUnderside', 'stair'])),
+  'stop.overrule': () => record('stop.overrule', { overrule: any.overrule, index }),
+  'stop.uphold': (survey) =>
+    one(survey.overruled.map(({ code, where }) => ({ code, where })))?.map((stop) => ({
+      type: 'stop.uphold',
+      ...stop,
+    })),
+  'guard.set': () =>
+    record(
+      'guard.set',
+      changes(any.guardFields, [
+        'topRailUnderside',
+        'stair',
+        'sphere',
+        'stairSphere',
+        'situation',
+        'fall',
+        'railTies',
+      ]),
+    ),
   'survey.set': () => record('survey.set', changes(fc.record({ title: any.title, units: any.units }), [])),
 }
 

@@ -24,6 +24,8 @@ export const postFields = optional(
     cover: size,
     along: nm,
     across: nm,
+    lumber: fixed('southern-pine-2', 'hem-fir-2'),
+    railTies: fc.boolean(),
     note: fc.string({ maxLength: 40 }),
   },
   [],
@@ -70,7 +72,10 @@ export const rectangle = fc.record({ width: nm, depth: nm, corners: fc.tuple(poi
 export const cornerAngle = fc.integer({ min: 1, max: 180 })
 export const guardFields = optional(
   {
-    rules: fixed('irc-2021', 'house'),
+    rules: fixed('irc-2021', 'nbc-2020', 'house'),
+    situation: fixed('dwelling', 'general'),
+    fall: size,
+    railTies: fc.boolean(),
     height: nm,
     topRailUnderside: nm,
     bottom: size,
@@ -81,6 +86,18 @@ export const guardFields = optional(
   },
   [],
 )
+const place = fc.oneof(
+  fc.constant({}),
+  fc.record({ run: fixed('R0', 'R1'), bay: fixed('B0', 'B1') }),
+  fc.record({ post: fixed(...ids) }),
+)
+/** An overrule of one of a few stops, so that the same one is often met again. */
+export const overrule = fc.record({
+  code: fixed('opening-between', 'guard-too-low'),
+  where: place,
+  text: fixed('The opening is 4 in.', 'The opening is 5 in.'),
+  reason: text,
+})
 export const units = fc.record({ length: fixed('in', 'mm'), force: fixed('lbf', 'N') })
 export const title = fixed('Back deck', ' Harbour stair ', 'Ü')
 export const length = nm
@@ -124,6 +141,10 @@ const parts = fc.record({
   runs: fc.array(fc.record({ fields: runFields, path: seeds(5), readings }), { maxLength: 3 }),
   diagonals: fc.array(fc.record({ from: fc.nat(), to: fc.nat(), value: nm }), { maxLength: 2 }),
   corners: fc.array(fc.tuple(fc.nat(), cornerAngle), { maxLength: 3 }),
+  overruled: fc.uniqueArray(overrule, {
+    maxLength: 3,
+    selector: ({ code, where }) => JSON.stringify([code, where]),
+  }),
   photos: fc.array(
     fc.record({
       posts: fc.array(fc.tuple(fc.nat(), mark), { maxLength: 3 }),
@@ -168,6 +189,7 @@ export const anySurvey: fc.Arbitrary<Survey> = parts.map((given) => {
       names,
       given.corners.map(([post]) => post),
     ).map((post, i) => ({ post, angle: given.corners[i]![1] })),
+    overruled: given.overruled,
     photos: given.photos.map((photo, i) => ({
       id: `F${i}`,
       file: `deck-${i}.jpg`,

@@ -1,6 +1,7 @@
 import type { HouseRules } from '@shared/schemas/house-rules'
 import { Card } from '@/components/page'
 import { FactList } from './fact-list'
+import { LumberFacts } from './lumber-rules'
 import { ruleGroups } from './rule-list'
 import { RuleValue } from './rule-value'
 import type { HouseUnits } from './rule-values'
@@ -19,5 +20,6 @@ export const HouseRulesFacts = ({ rules, units }: { rules: HouseRules; units: Ho
         />
       </Card>
     ))}
+    <LumberFacts lumber={rules.lumber} units={units} />
   </div>
 )

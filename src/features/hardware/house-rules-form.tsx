@@ -5,6 +5,7 @@ import { Button } from '@/components/button'
 import { Card } from '@/components/page'
 import { sayDone } from '@/components/toast'
 import { useSaveHouseRules } from './api/save-house-rules'
+import { LumberRules } from './lumber-rules'
 import { RuleField } from './rule-field'
 import { ruleGroups } from './rule-list'
 import type { HouseUnits } from './rule-values'
@@ -51,6 +52,13 @@ export function HouseRulesForm({ rules: saved, units }: HouseRulesFormProps) {
           </div>
         </Card>
       ))}
+      <LumberRules
+        key={`lumber ${begun}`}
+        lumber={rules.lumber}
+        units={units}
+        error={error}
+        onChange={(lumber) => setRules((now) => ({ ...now, lumber }))}
+      />
       <Button className="self-start" onClick={startAgain}>
         Put all starting values in
       </Button>

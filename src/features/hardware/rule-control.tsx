@@ -1,5 +1,5 @@
 import type { HouseRules } from '@shared/schemas/house-rules'
-import { ChoiceGroup } from '@/components/choices'
+import { Checkbox, ChoiceGroup } from '@/components/choices'
 import { LengthField } from '@/components/length-field'
 import { NumberField } from '@/components/number-field'
 import { ForceField } from './force-field'
@@ -39,24 +39,36 @@ export function RuleControl({ rule, rules, units, error, onChange }: RuleControl
         label={label}
         hint={meaning}
         unit={units.force}
-        value={rules.tension}
+        value={rules[rule.key]}
         error={refusalAt(error, rule.key, allowed.force)}
-        onChange={(tension) => tension !== undefined && onChange({ tension })}
+        onChange={(value) => {
+          if (value !== undefined || rule.optional === true) onChange({ [rule.key]: value })
+        }}
       />
     )
   }
   if (rule.kind === 'number') {
-    const { unit, most } = rule
+    const { unit, most, least = 0 } = rule
     return (
       <NumberField
         label={label}
         hint={meaning}
         unit={unit}
-        min={0}
+        min={least}
         max={most}
         value={shownNumber(rule, rules)}
-        error={refusalAt(error, rule.key, `Write 0 to ${most} ${unit}.`)}
+        error={refusalAt(error, rule.key, `Write ${least} to ${most} ${unit}.`)}
         onChange={(value) => value !== undefined && onChange({ [rule.key]: value / shareOf(rule) })}
+      />
+    )
+  }
+  if (rule.kind === 'switch') {
+    return (
+      <Checkbox
+        label={label}
+        hint={meaning}
+        checked={rules[rule.key]}
+        onChange={(event) => onChange({ [rule.key]: event.target.checked })}
       />
     )
   }

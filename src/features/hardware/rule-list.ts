@@ -11,15 +11,17 @@ export type Rule =
   | { kind: 'length'; key: LengthRule; label: string; meaning: string; optional?: boolean; above?: boolean }
   | {
       kind: 'number'
-      key: 'gaugeLimit' | 'maxBend' | 'reserve'
+      key: 'gaugeLimit' | 'maxBend' | 'reserve' | 'coldest' | 'hottest' | 'tensionedAt'
       label: string
       meaning: string
       /** A share is written in per cent. */
-      unit: '°' | '%'
-      /** The most that may be written; the least is zero. */
+      unit: '°' | '%' | '°C'
+      /** The most that may be written; the least is zero unless said. */
       most: number
+      least?: number
     }
-  | { kind: 'force'; key: 'tension'; label: string; meaning: string }
+  | { kind: 'force'; key: 'tension' | 'leastPush'; label: string; meaning: string; optional?: boolean }
+  | { kind: 'switch'; key: 'wetService'; label: string; meaning: string }
   | {
       kind: 'choice'
       key: 'stacking' | 'grouping' | 'tapeClass'
@@ -28,7 +30,7 @@ export type Rule =
       choices: readonly { value: string; label: string }[]
     }
 
-/** Every house rule with its meaning in one sentence, grouped as the work goes. */
+/** Every house rule but the lumber, which is a list of its own, with its meaning in one sentence, grouped as the work goes. */
 export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = [
   {
     title: 'Measuring',
@@ -181,6 +183,58 @@ export const ruleGroups: readonly { title: string; rules: readonly Rule[] }[] = 
         above: true,
         label: 'Wide bay',
         meaning: 'A clear bay beyond this wants a spacer.',
+      },
+    ],
+  },
+  {
+    title: 'Checks',
+    rules: [
+      {
+        kind: 'force',
+        key: 'leastPush',
+        label: 'Least push',
+        meaning:
+          'What it should take to force the rules’ sphere between two cables; the US codes set no figure.',
+        optional: true,
+      },
+      {
+        kind: 'length',
+        key: 'edgeWall',
+        label: 'Edge wall',
+        meaning: 'What a hole leaves of a post’s core at either side at least.',
+      },
+      {
+        kind: 'number',
+        key: 'tensionedAt',
+        label: 'Tensioned at',
+        unit: '°C',
+        least: -80,
+        most: 80,
+        meaning: 'The temperature at which cables are usually tensioned.',
+      },
+      {
+        kind: 'number',
+        key: 'coldest',
+        label: 'Coldest',
+        unit: '°C',
+        least: -80,
+        most: 80,
+        meaning: 'Design temperature at which cables are tightest.',
+      },
+      {
+        kind: 'number',
+        key: 'hottest',
+        label: 'Hottest',
+        unit: '°C',
+        least: -80,
+        most: 80,
+        meaning: 'Design temperature at which cables are slackest.',
+      },
+      {
+        kind: 'switch',
+        key: 'wetService',
+        label: 'Posts stand wet',
+        meaning: 'Outdoors the wet service factor 0.85 is taken where it applies (NDS Supplement).',
       },
     ],
   },

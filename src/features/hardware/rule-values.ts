@@ -21,10 +21,14 @@ export function ruleText(rule: Rule, rules: HouseRules, { force, format }: House
     const value = rules[rule.key]
     return value === undefined ? 'none' : writeLength(value, format)
   }
-  if (rule.kind === 'force') return forceText(rules.tension, force)
+  if (rule.kind === 'force') {
+    const value = rules[rule.key]
+    return value === undefined ? 'none' : forceText(value, force)
+  }
+  if (rule.kind === 'switch') return rules[rule.key] ? 'yes' : 'no'
   if (rule.kind === 'number') {
     const number = shownNumber(rule, rules)
-    return rule.unit === '%' ? `${number} %` : `${number}°`
+    return rule.unit === '°' ? `${number}°` : `${number} ${rule.unit}`
   }
   const value = rules[rule.key] ?? ''
   return rule.choices.find((choice) => choice.value === value)?.label ?? value

@@ -36,6 +36,22 @@ export function SurveyPanel({ view, actions }: PanelProps) {
       }}
     />
   )
+  /** Left empty, that of the guard rules. */
+  const sphere = (key: 'sphere' | 'stairSphere', label: string) => (
+    <MeasureField
+      label={label}
+      value={guard[key]}
+      format={formatOf(view)}
+      disabled={!canEdit}
+      onChange={(given) =>
+        actions.perform({
+          type: 'guard.set',
+          set: given === undefined ? {} : { [key]: given },
+          unset: given === undefined ? [key] : [],
+        })
+      }
+    />
+  )
   return (
     <div className="flex flex-col gap-5">
       <TextField
@@ -73,8 +89,8 @@ export function SurveyPanel({ view, actions }: PanelProps) {
           }
         />
         {height('Opening begins at', guard.bottom, (given) => ({ bottom: given }))}
-        {height('No sphere of', guard.sphere, (given) => ({ sphere: given }))}
-        {height('On stairs no sphere of', guard.stairSphere, (given) => ({ stairSphere: given }))}
+        {sphere('sphere', 'No sphere of')}
+        {sphere('stairSphere', 'On stairs no sphere of')}
         {height('Top readings at', guard.readAt.top, (top) => ({ readAt: { ...guard.readAt, top } }))}
         {height('Bottom readings at', guard.readAt.bottom, (bottom) => ({
           readAt: { ...guard.readAt, bottom },

@@ -29,6 +29,10 @@ const fields: Record<string, string> = {
   stairSphere: 'sphere that must not pass on stairs',
   readAt: 'heights of the readings',
   stair: 'heights on stairs',
+  situation: 'situation',
+  fall: 'fall beside the walking surface',
+  railTies: 'whether the top rail ties the posts',
+  lumber: 'species and grade',
   rules: 'rules followed',
   title: 'title',
   units: 'units',
@@ -90,6 +94,10 @@ export function describeOperation(operation: SurveyOperation, format: LengthForm
       return `marked the rectangle on photo ${operation.photo}`
     case 'photo.clearRectangle':
       return `removed the rectangle from photo ${operation.photo}`
+    case 'stop.overrule':
+      return `let a stop pass (${operation.overrule.text}): ${operation.overrule.reason}`
+    case 'stop.uphold':
+      return 'made a stop stand again that was let pass'
     case 'guard.set':
       return `changed the guard: ${changed(operation)}`
     case 'survey.set':

@@ -7,6 +7,9 @@ export const sample = {
     title: 'Back deck',
     guard: {
       rules: 'irc-2021',
+      situation: 'dwelling',
+      fall: 60,
+      railTies: true,
       height: 36,
       topRailUnderside: 34.5,
       bottom: 0,
@@ -17,7 +20,7 @@ export const sample = {
     },
     posts: [
       { id: 'P1', material: 'veneered', core: 'softwood', cover: 0.75, along: 5, across: 5 },
-      { id: 'P2', material: 'softwood', along: 3.5, across: 3.5 },
+      { id: 'P2', material: 'softwood', along: 3.5, across: 3.5, lumber: 'hem-fir-2', railTies: false },
       { id: 'P3', material: 'masonry', along: 8, across: 8, note: 'brick' },
       { id: 'P4', material: 'metal' },
     ],
@@ -81,6 +84,16 @@ export const sample = {
         },
       },
     ],
+    overruled: [
+      {
+        code: 'opening-between',
+        where: { run: 'R1', bay: 'B1' },
+        text: 'Bay B1: the opening is 4 in.',
+        reason: 'A glass panel stands behind it',
+        by: 'The estimator',
+        on: '2026-05-05T08:00:00Z',
+      },
+    ],
   },
   hardware: {
     cables: [
@@ -106,6 +119,7 @@ export const sample = {
         headProjection: 0.25,
         cutPastFace: 1,
         takeUp: 0.75,
+        rating: 900,
         maxAngle: 5,
         maxRun: 240,
         minGrip: { softwood: 1.5, hardwood: 1.25 },
@@ -136,6 +150,13 @@ export const sample = {
     cornerOverlap: 0.0625,
     cornerWeb: 0.25,
     keepOffcut: 60,
+    edgeWall: 0.5,
+    leastPush: 5,
+    coldest: -20,
+    hottest: 40,
+    tensionedAt: 15,
+    lumber: [{ id: 'hem-fir-2', name: 'Hem-Fir No. 2', bending: 850, sizeFactor: 1.5, modulus: 1300000 }],
+    wetService: true,
   },
 }
 
