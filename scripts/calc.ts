@@ -1,10 +1,12 @@
 import { readFileSync } from 'node:fs'
 import { resolve } from 'node:path'
+import { checkSurvey } from '../shared/calculation/checks/check-survey'
 import { calculateSurvey } from '../shared/calculation/calculate-survey'
 import { starterHardware } from '../shared/calculation/starter-hardware'
 import { starterRules } from '../shared/calculation/starter-rules'
 import type { CalculationInput } from '../shared/calculation/survey-index'
 import { readSurveyFile, SurveyFileError } from '../shared/schemas/survey-file'
+import { writeChecks } from './calc/write-checks'
 import { writeCutList } from './calc/write-cut-list'
 
 /** Bad input: one sentence per fault. */
@@ -20,11 +22,15 @@ const calculations: Record<string, (document: unknown) => unknown> = {
     const input = readInput(document)
     return writeCutList(calculateSurvey(input), input.survey.units)
   },
+  checks: (document) => {
+    const input = readInput(document)
+    return writeChecks(checkSurvey(input), input.survey.units)
+  },
 }
 
 /** Reads a survey file and fills in the starter hardware and rules where it has none. */
 function readInput(document: unknown): CalculationInput {
-  const { survey, hardware = starterHardware, rules = starterRules } = readSurveyFile(document)
+  const { survey, hardware = starterHardware, rules = starterRules, guardRules } = readSurveyFile(document)
   const cables = new Set(hardware.cables.map(({ id }) => id))
   const faults = survey.runs.flatMap(({ cable }, i) =>
     cables.has(cable)
@@ -34,7 +40,7 @@ function readInput(document: unknown): CalculationInput {
         ],
   )
   if (faults.length > 0) throw new BadInput(faults)
-  return { survey, hardware, rules }
+  return { survey, hardware, rules, guardRules }
 }
 
 /** npm runs its scripts in the package's folder; a relative file is meant from where the command was given. */

@@ -1,25 +1,13 @@
 import type { CableResult, SurveyResult } from '../../shared/calculation/result'
-import { placeName } from '../../shared/schemas/finding'
 import type { Units } from '../../shared/schemas/quantities'
-import { toInches, toMillimetres } from '../../shared/units/length'
-
-/** Figures are written to ten decimals: what lies beyond is the noise of floating-point sums. */
-const written = (value: number): number => Number(value.toFixed(10)) + 0
+import { quantityWriter, writeFindings } from './write-quantities'
 
 /** The answer of `cutlist`, in the file's own units; a key without a value is left out. */
 export function writeCutList({ cables, findings }: SurveyResult, units: Units) {
-  const length = (nm: number | undefined) =>
-    nm === undefined || !Number.isFinite(nm)
-      ? undefined
-      : written(units.length === 'in' ? toInches(nm) : toMillimetres(nm))
+  const { length } = quantityWriter(units)
   return {
     cables: cables.map((cable) => writeCable(cable, length)),
-    findings: findings.map(({ level, code, where, text }) => ({
-      level,
-      code,
-      where: placeName(where),
-      text,
-    })),
+    findings: writeFindings(findings),
   }
 }
 

@@ -1,7 +1,7 @@
-import type { Finding } from '../schemas/finding'
 import { calculateRun } from './calculate-run'
 import { bayFindings } from './findings/reading-findings'
 import { toFinding } from './findings/notice'
+import { once } from './findings/once'
 import type { SurveyResult } from './result'
 import { type CalculationInput, indexSurvey } from './survey-index'
 
@@ -26,10 +26,4 @@ export function calculateSurvey(input: CalculationInput): SurveyResult {
     cables: calculated.flatMap(({ result }) => result.cables),
     findings: once([...ofBays, ...calculated.flatMap(({ findings }) => findings)]),
   }
-}
-
-/** What two runs say alike of a post they share is said once. */
-function once(findings: Finding[]): Finding[] {
-  const said = new Set<string>()
-  return findings.filter(({ text }) => !said.has(text) && said.add(text))
 }

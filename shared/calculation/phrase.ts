@@ -1,10 +1,16 @@
 import type { Units } from '../schemas/quantities'
 import { toPoundsForce } from '../units/force'
+import { toPsi } from '../units/stress'
 import { NM_PER_INCH, toMillimetres } from '../units/length'
 
 /** A number inside a sentence, in the program's own units, so that each reader sees it in theirs. */
 export type Figure =
-  { length: number } | { angle: number } | { force: number } | { number: number } | { percent: number }
+  | { length: number }
+  | { angle: number }
+  | { force: number }
+  | { stress: number }
+  | { number: number }
+  | { percent: number }
 
 /** A sentence with its numbers still numbers. */
 export type Phrase = readonly (string | Figure)[]
@@ -26,11 +32,16 @@ function inchText(nm: number): string {
   return `${sign}${whole === 0 ? '' : `${Math.abs(whole)} `}${numerator}/${denominator} in`
 }
 
+/** N/mm² as psi or as it is. */
+const stressText = (stress: number, { length }: Units): string =>
+  length === 'in' ? `${places(toPsi(stress), 0)} psi` : `${places(stress, 2)} N/mm²`
+
 function figureText(figure: Figure, units: Units): string {
   if ('length' in figure) {
     return units.length === 'in' ? inchText(figure.length) : `${places(toMillimetres(figure.length), 2)} mm`
   }
   if ('angle' in figure) return `${places(figure.angle, 2)}°`
+  if ('stress' in figure) return stressText(figure.stress, units)
   if ('percent' in figure) return `${places(figure.percent * 100, 3)} %`
   if ('number' in figure) return places(figure.number, 6)
   return units.force === 'lbf'

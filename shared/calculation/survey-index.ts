@@ -1,4 +1,5 @@
 import type { Bay } from '../schemas/bay'
+import type { GuardRules } from '../schemas/guard-rules'
 import type { Cable, Hardware } from '../schemas/hardware'
 import type { HouseRules } from '../schemas/house-rules'
 import type { Post } from '../schemas/post'
@@ -10,6 +11,8 @@ export interface CalculationInput {
   survey: Survey
   hardware: Hardware
   rules: HouseRules
+  /** The company's own guard rules. */
+  guardRules?: GuardRules[]
 }
 
 /** The input with its names resolved, made once per calculation. */
