@@ -4,6 +4,7 @@ import { quantitiesIn } from '../schemas/quantities'
 import { inches } from '../units/length'
 import { toPoundsForce } from '../units/force'
 import { axialStiffness } from './cable-properties'
+import { startingBreakingLoad } from './published-breaking-loads'
 
 type HardwareInput = z.input<ReturnType<typeof makeHardwareSchema>>
 type CableInput = HardwareInput['cables'][number]
@@ -13,29 +14,21 @@ type FittingInput = HardwareInput['fittings'][number]
 const stiffness = (diameter: number): number =>
   Math.round(toPoundsForce(axialStiffness({ construction: '7x7', diameter: inches(diameter) })) / 10) * 10
 
-const cable = (
-  id: string,
-  name: string,
-  [diameter, breakingLoad]: readonly [number, number],
-): CableInput => ({
+const cable = (id: string, name: string, diameter: number): CableInput => ({
   id,
   name,
   construction: '7x7',
   diameter,
   axialStiffness: stiffness(diameter),
   settlingStretch: 0.00125,
-  breakingLoad,
+  breakingLoad: startingBreakingLoad(diameter),
   price: 0,
 })
 
-/**
- * Starting breaking loads, lbf: those of 7x19 wire in FAA AC 43.13-1B table 7-3 (1760, 2400, 3700) less a fifth, because
- * type 316 is weaker. The share is a guess: the maker's certificate decides.
- */
 const cables: CableInput[] = [
-  cable('c18', '1/8 in 7x7 stainless', [0.125, 1400]),
-  cable('c532', '5/32 in 7x7 stainless', [0.15625, 1900]),
-  cable('c316', '3/16 in 7x7 stainless', [0.1875, 2950]),
+  cable('c18', '1/8 in 7x7 stainless', 0.125),
+  cable('c532', '5/32 in 7x7 stainless', 0.15625),
+  cable('c316', '3/16 in 7x7 stainless', 0.1875),
 ]
 
 const allCables = cables.map(({ id }) => id)
@@ -49,6 +42,7 @@ const drilled = {
   headProjection: 0.25,
   cutPastFace: 1,
   takeUp: 0.75,
+  rating: 700,
   maxRun: 480,
   minGrip: { softwood: 1.5, hardwood: 1.25 },
   hole: 0.5625,
@@ -79,6 +73,7 @@ const fittings: FittingInput[] = [
     headProjection: 2.5,
     cutPastFace: 1,
     takeUp: 0.875,
+    rating: 700,
     maxAngle: 50,
     maxRun: 480,
     price: 21,
@@ -93,6 +88,7 @@ const fittings: FittingInput[] = [
     headProjection: 2,
     cutPastFace: 1,
     takeUp: 0.875,
+    rating: 700,
     maxAngle: 50,
     maxRun: 480,
     price: 14,
