@@ -68,6 +68,8 @@ export function checkPost(
   const section = isWood(core) ? sectionOf(end) : undefined
   const allowable = section && allowableOf(post.lumber, rules)
   const sized = section && rectangleSection(toMillimetres(section.along), toMillimetres(section.across))
+  // What lies above the rail is said elsewhere and bends no post below it.
+  const below = { ...loads, heights: loads.heights.filter((height) => height < length) }
   const beam = sized && allowable && { height: length, stiffness: allowable.lumber.modulus * sized.inertia }
   const answer = (moment: number, deflection: number | undefined): SupportAnswer => ({
     moment,
@@ -82,8 +84,8 @@ export function checkPost(
     post: post.id,
     pull: loads.force * loads.heights.length,
     propped: answer(
-      proppedMoment(loads, length),
-      beam && deflectionAt(length / 2, loads, (x, a) => proppedDeflection(beam, x, a)),
+      proppedMoment(below, length),
+      beam && deflectionAt(length / 2, below, (x, a) => proppedDeflection(beam, x, a)),
     ),
     cantilever: answer(
       cantileverMoment(loads),

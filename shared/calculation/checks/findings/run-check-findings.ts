@@ -1,7 +1,8 @@
 import type { Fitting } from '../../../schemas/hardware'
 import type { HouseRules } from '../../../schemas/house-rules'
-import type { Notice } from '../../findings/notice'
+import { cableNumbers, type Notice } from '../../findings/notice'
 import type { Phrase } from '../../phrase'
+import { exceeds } from '../../round-to-step'
 import type { RunCheck } from '../check-run'
 import { type CheckedRun, fittingsOf } from '../checked-run'
 
@@ -11,7 +12,36 @@ import { type CheckedRun, fittingsOf } from '../checked-run'
  * Source: section 7 of the calculation for the temperatures.
  */
 export function runCheckFindings(run: CheckedRun, check: RunCheck, rules: HouseRules): Notice[] {
-  return [...limitFindings(run, check), ...unknownLimits(run), temperatureNote(check, rules)]
+  return [
+    ...outsideFindings(run),
+    ...limitFindings(run, check),
+    ...unknownLimits(run),
+    temperatureNote(check, rules),
+  ]
+}
+
+/** Heights given one by one may miss the opening. */
+function outsideFindings({ figures, heights }: CheckedRun): Notice[] {
+  const { bottom, top } = figures.opening
+  const run = figures.course.run.id
+  const outside = heights.flatMap((height, i) =>
+    exceeds(bottom, height) || exceeds(height, top) ? [i + 1] : [],
+  )
+  if (outside.length === 0) return []
+  return [
+    {
+      level: 'stop',
+      code: 'cable-outside',
+      where: { run },
+      phrase: [
+        `Run ${run}: ${cableNumbers(outside)} ${outside.length === 1 ? 'lies' : 'lie'} outside the opening from `,
+        { length: bottom },
+        ' to ',
+        { length: top },
+        '. Change the heights, or the guard’s.',
+      ],
+    },
+  ]
 }
 
 function limitFindings({ cable, figures }: CheckedRun, { run, tension, whenCold }: RunCheck): Notice[] {
@@ -55,7 +85,7 @@ function unknownLimits({ cable, figures }: CheckedRun): Notice[] {
 const unique = (fittings: readonly Fitting[]): Fitting[] => [...new Set(fittings)]
 
 function temperatureNote({ run, tension, whenCold, whenHot }: RunCheck, rules: HouseRules): Notice {
-  const slack = whenHot <= 0
+  const slack = whenHot <= tension * 1e-12
   const hot: Phrase = slack
     ? [`at ${rules.hottest} °C it goes slack`]
     : [`at ${rules.hottest} °C `, { force: whenHot }]
