@@ -39,7 +39,7 @@ export interface Loaded {
   rules: HouseRules
 }
 
-/** What a survey's screens need before they can begin. */
+/** What a survey's screens need before they can begin; `stale` says why what is shown could not be read again. */
 export function useSurveyData(surveyId: string) {
   const record = useQuery(surveyQuery(surveyId))
   const catalogue = useQuery(hardwareQuery)
@@ -55,7 +55,7 @@ export function useSurveyData(surveyId: string) {
   }
   const data: Loaded | undefined =
     record.data && hardware && rules.data ? { record: record.data, hardware, rules: rules.data } : undefined
-  return { data, error: data ? null : error, retry }
+  return { data, error: data ? null : error, stale: data ? error : null, readAt: record.dataUpdatedAt, retry }
 }
 
 /** Opens a survey for editing; what is loaded afterwards does not disturb the copy in hand. */
@@ -133,10 +133,11 @@ async function reread(surveyId: string, since: number) {
 
 function useSendOnReturn(queue: ChangeQueue): void {
   useEffect(() => {
+    queue.start()
     window.addEventListener('online', queue.flush)
     return () => {
       window.removeEventListener('online', queue.flush)
-      queue.flush()
+      queue.stop()
     }
   }, [queue])
 }

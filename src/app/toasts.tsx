@@ -1,10 +1,15 @@
 import { Toaster } from 'sonner'
 
-/** Where short notices appear: at the top on a phone, clear of the thumb's buttons. */
+/** Below the bar at the top, so that its links stay in reach, and clear of the thumb’s buttons. */
+const clearOfBar = { top: 72, left: 16, right: 16 }
+
+/** Where short notices appear. */
 export default function Toasts() {
   return (
     <Toaster
       position="top-center"
+      offset={clearOfBar}
+      mobileOffset={clearOfBar}
       toastOptions={{
         style: {
           background: 'var(--card)',

@@ -1,3 +1,7 @@
+/** A moment as day and time people read, in their own time zone. */
+export const momentText = (moment: string | number): string =>
+  new Date(moment).toLocaleString(undefined, { dateStyle: 'medium', timeStyle: 'short' })
+
 /** A day or a moment as a date people read. */
 export const dateText = (date: string): string =>
   // A day alone belongs to no time zone: noon keeps it the same day everywhere.

@@ -1,4 +1,4 @@
-import { useMemo } from 'react'
+import { type ReactNode, useMemo } from 'react'
 import { Link, useParams } from 'react-router-dom'
 import { surveys as endpoints } from '@shared/endpoints/surveys'
 import { calculateSurvey } from '@shared/calculation/calculate-survey'
@@ -13,13 +13,15 @@ import { Findings, RunSection, Totals } from '@/features/cut-list/cut-list'
 import { PickList } from '@/features/cut-list/pick-list'
 import { useSession } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
+import { momentText } from '@/lib/date-text'
+import { StaleNote } from '../stale-note'
 import { lengthFormat } from '../length-format'
 import { paths } from '../paths'
 import { type Loaded, useSurveyData } from '../survey-session'
 
 export function Component() {
   const { surveyId = '' } = useParams()
-  const { data, error, retry } = useSurveyData(surveyId)
+  const { data, error, stale, readAt, retry } = useSurveyData(surveyId)
   if (error) {
     return (
       <Page title="Cut list">
@@ -27,10 +29,17 @@ export function Component() {
       </Page>
     )
   }
-  return data ? <CutList loaded={data} /> : <Loading what="the cut list" />
+  return data ? (
+    <CutList
+      loaded={data}
+      note={stale ? <StaleNote readAt={readAt} error={stale} onRetry={retry} /> : null}
+    />
+  ) : (
+    <Loading what="the cut list" />
+  )
 }
 
-function CutList({ loaded: { record, hardware, rules } }: { loaded: Loaded }) {
+function CutList({ loaded: { record, hardware, rules }, note }: { loaded: Loaded; note: ReactNode }) {
   const { company } = useSession()
   const { survey } = record
   const input = useMemo(() => ({ survey, hardware, rules }), [survey, hardware, rules])
@@ -67,6 +76,10 @@ function CutList({ loaded: { record, hardware, rules } }: { loaded: Loaded }) {
         </>
       }
     >
+      <p className="mb-4 text-sm text-soft">
+        Revision {record.revision} of the survey, last changed {momentText(record.updatedAt)}.
+      </p>
+      {note}
       {list.groups.length === 0 ? (
         <EmptyState
           title="No runs yet"

@@ -28,6 +28,8 @@ export class ChangeQueue {
   private timer: ReturnType<typeof setTimeout> | undefined
   /** The lasting trouble that was told already; it is not told again with every try. */
   private told = ''
+  /** Nothing is sent once the screen is left: the next person at it would be the sender. */
+  private stopped = false
   /** One by one after a refusal, so that only what the server will not have is given up. */
   private batch = BATCH
 
@@ -54,6 +56,7 @@ export class ChangeQueue {
   /** Sends what is pending now; also for when the signal is back. */
   readonly flush = (): void => {
     clearTimeout(this.timer)
+    if (this.stopped) return
     this.running ??= this.sendAll().finally(() => {
       this.running = undefined
     })
@@ -64,10 +67,19 @@ export class ChangeQueue {
     while (this.running) await this.running
   }
 
-  readonly stop = (): void => clearTimeout(this.timer)
+  /** Sends no more until `start`; a request under way is not called back. */
+  readonly stop = (): void => {
+    this.stopped = true
+    clearTimeout(this.timer)
+  }
+
+  readonly start = (): void => {
+    this.stopped = false
+    this.flush()
+  }
 
   private async sendAll(): Promise<void> {
-    while (this.state.pending.length > 0) {
+    while (this.state.pending.length > 0 && !this.stopped) {
       const changes = this.state.pending.slice(0, this.batch)
       this.take({ type: 'sending', count: this.batch })
       try {
@@ -92,6 +104,7 @@ export class ChangeQueue {
       this.told = refusal.code
       return this.wait()
     }
+    if (refusal.status === 404) return this.giveUp(refusal)
     if (refusal.code !== 'survey-moved' && this.state.sending > 1) {
       this.batch = 1
       this.take({ type: 'held' })
@@ -104,13 +117,26 @@ export class ChangeQueue {
       this.take({ type: moved ? 'reread' : 'refused', ...now }, moved)
       this.deps.onRebased(this.state.shown)
       return true
-    } catch {
-      return this.wait()
+    } catch (failed) {
+      return failed instanceof ApiError && failed.status === 404 ? this.giveUp(failed) : this.wait()
     }
+  }
+
+  /** The survey is there no more: trying again would not help. */
+  private giveUp({ code, message }: ApiError): false {
+    if (this.told !== code) {
+      this.deps.onTrouble(
+        `${message} ${this.count()} not saved, and stay${this.state.pending.length === 1 ? 's' : ''} on this screen only. Ask an owner or estimator to bring the survey back.`,
+      )
+    }
+    this.told = code
+    this.take({ type: 'unreachable' })
+    return false
   }
 
   private wait(): false {
     this.take({ type: 'unreachable' })
+    if (this.stopped) return false
     this.timer = setTimeout(this.flush, this.deps.retryAfter ?? 4000)
     return false
   }

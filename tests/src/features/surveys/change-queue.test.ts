@@ -171,3 +171,50 @@ describe('ChangeQueue', () => {
     queue.stop()
   })
 })
+
+describe('a survey that was put away meanwhile', () => {
+  it('keeps what is unsent, says so once and stops asking by itself', async () => {
+    vi.useFakeTimers()
+    const server = new FakeServer()
+    const { queue, onTrouble } = queueOn(server)
+    server.refuses = new ApiError('not-found', 404, 'There is no such survey.')
+    queue.perform(post('P1'))
+    await queue.settled()
+    await vi.advanceTimersByTimeAsync(1e7)
+    expect(server.requests).toBe(1)
+    queue.flush()
+    await queue.settled()
+    expect(onTrouble).toHaveBeenCalledTimes(1)
+    expect(onTrouble.mock.calls[0]?.[0]).toMatch(/no such survey.*One change is not saved/)
+    expect(ids(queue.getSnapshot().shown)).toEqual(['P1'])
+    vi.useRealTimers()
+  })
+})
+
+describe('a queue that was stopped', () => {
+  it('sends nothing more, not even when the signal is back, until it is started again', async () => {
+    const server = new FakeServer()
+    const { queue } = queueOn(server)
+    server.reachable = false
+    queue.perform(post('P1'))
+    await queue.settled()
+    queue.stop()
+    server.reachable = true
+    queue.flush()
+    await queue.settled()
+    expect(server.revision).toBe(0)
+    queue.start()
+    await queue.settled()
+    expect(ids(server.survey)).toEqual(['P1'])
+  })
+
+  it('does not begin another request after the one under way', async () => {
+    const server = new FakeServer()
+    const { queue } = queueOn(server)
+    queue.perform(post('P1'))
+    queue.perform(post('P2'))
+    queue.stop()
+    await queue.settled()
+    expect(server.requests).toBe(1)
+  })
+})
