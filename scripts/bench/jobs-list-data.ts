@@ -1,3 +1,4 @@
+import type { Role } from '../../shared/schemas/role'
 import { hash } from 'bcryptjs'
 import type { OpenDatabase } from '../../server/database/client'
 import { companies, people } from '../../server/database/tables/index'
@@ -23,7 +24,7 @@ export async function fillWithJobs({ database, sql }: OpenDatabase, count: numbe
     companyId: company.id,
     name: `Person ${i}`,
     email: `person-${i}@example.com`,
-    roles: i === 0 ? ['owner'] : ['surveyor'],
+    roles: (i === 0 ? ['owner'] : ['surveyor']) satisfies Role[] as Role[],
   }))
   const passwordHash = await hash(password, 10)
   const made = await database

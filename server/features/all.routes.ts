@@ -2,6 +2,7 @@ import type { Router } from 'express'
 import type { Services } from '../services'
 import { companyRoutes } from './company/company.routes'
 import { cutListRoutes } from './cut-list/cut-list.routes'
+import { guardRulesRoutes } from './guard-rules/guard-rules.routes'
 import { hardwareRoutes } from './hardware/hardware.routes'
 import { houseRulesRoutes } from './house-rules/house-rules.routes'
 import { jobsRoutes } from './jobs/jobs.routes'
@@ -22,5 +23,6 @@ export function featureRoutes(router: Router, services: Services): void {
   photosRoutes(router, services)
   cutListRoutes(router, services)
   hardwareRoutes(router, services)
+  guardRulesRoutes(router, services)
   houseRulesRoutes(router, services)
 }

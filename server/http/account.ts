@@ -1,6 +1,5 @@
 import type { Company } from '@shared/schemas/company'
 import type { Person } from '@shared/schemas/person'
-import type { Role } from '@shared/schemas/role'
 import type { companies, people } from '../database/tables/index'
 import type { SignedIn } from './signed-in'
 
@@ -21,7 +20,7 @@ export const presentPerson = (row: PersonRow): Person => ({
   id: row.id,
   name: row.name,
   email: row.email,
-  roles: row.roles as Role[],
+  roles: row.roles,
   state: row.disabledAt ? 'disabled' : row.passwordHash === null ? 'invited' : 'active',
   lastSignIn: row.lastSignInAt?.toISOString() ?? null,
 })
@@ -35,7 +34,7 @@ export const toSignedIn = (
   companyId: person.companyId,
   name: person.name,
   email: person.email,
-  roles: person.roles as Role[],
+  roles: person.roles,
   lastSignIn: person.lastSignInAt?.toISOString() ?? null,
   company: presentCompany(company),
 })

@@ -90,7 +90,7 @@ async function seedSurvey(
   })
   await changeSurvey(deps.database, {
     survey: { companyId, surveyId: survey.id },
-    person: people.surveyor,
+    person: { ...people.surveyor, roles: ['surveyor'] },
     revision: survey.revision,
     changes: operations.map((operation) => ({ id: randomUUID(), operation })),
     now: deps.clock(),

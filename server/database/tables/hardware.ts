@@ -11,7 +11,8 @@ import {
 } from 'drizzle-orm/pg-core'
 import { companies } from './companies'
 
-const entry = {
+/** What every entry of a company’s catalogue is kept with. */
+export const entryColumns = {
   companyId: uuid('company_id').notNull(),
   key: uuid('key').notNull().defaultRandom(),
   /** The catalogue's own id, `c532`; unique in the company and never changed, since surveys name it. */
@@ -23,13 +24,13 @@ const entry = {
   updatedAt: timestamp('updated_at', { withTimezone: true }).notNull().defaultNow(),
 }
 
-export const cables = pgTable('cables', entry, (table) => [
+export const cables = pgTable('cables', entryColumns, (table) => [
   primaryKey({ columns: [table.companyId, table.key] }),
   unique('cables_id_unique').on(table.companyId, table.id),
   foreignKey({ columns: [table.companyId], foreignColumns: [companies.id] }),
 ])
 
-export const fittings = pgTable('fittings', entry, (table) => [
+export const fittings = pgTable('fittings', entryColumns, (table) => [
   primaryKey({ columns: [table.companyId, table.key] }),
   unique('fittings_id_unique').on(table.companyId, table.id),
   foreignKey({ columns: [table.companyId], foreignColumns: [companies.id] }),

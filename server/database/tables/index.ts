@@ -1,4 +1,5 @@
 export * from './companies'
+export * from './guard-rules'
 export * from './hardware'
 export * from './house-rules'
 export * from './invitations'

@@ -1,3 +1,4 @@
+import type { Role } from '@shared/schemas/role'
 import { sql } from 'drizzle-orm'
 import { pgTable, primaryKey, text, timestamp, uniqueIndex, uuid } from 'drizzle-orm/pg-core'
 import { companies } from './companies'
@@ -12,7 +13,7 @@ export const people = pgTable(
     id: uuid('id').notNull().defaultRandom(),
     name: text('name').notNull(),
     email: text('email').notNull(),
-    roles: text('roles').array().notNull(),
+    roles: text('roles').array().notNull().$type<Role[]>(),
     /** None until the one-time link has been used. */
     passwordHash: text('password_hash'),
     disabledAt: timestamp('disabled_at', { withTimezone: true }),

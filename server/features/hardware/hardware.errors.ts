@@ -1,5 +1,5 @@
 import { AppError, notFound } from '../../errors'
-import type { EntryKind } from './hardware.queries'
+import type { EntryKind } from '../../database/catalogue-entries.queries'
 
 export const noSuchEntry = (kind: EntryKind) => notFound(kind)
 

@@ -18,7 +18,7 @@ import {
   selectEntries,
   selectEntry,
   updateEntry,
-} from './hardware.queries'
+} from '../../database/catalogue-entries.queries'
 
 /** Whose hardware. */
 export interface HardwareScope {

@@ -1,12 +1,14 @@
 import type { SurveyChange } from '@shared/endpoints/surveys'
+import type { Role } from '@shared/permissions/roles'
 import { type Survey, surveySchema } from '@shared/schemas/survey'
 import { applyOperation } from '@shared/survey/apply-operation'
 import { OperationRefused } from '@shared/survey/operation-refused'
 import { surveyOperationSchema } from '@shared/survey/survey-operation'
 import type { Database } from '../../database/client'
 import { listHardware } from '../hardware/hardware.service'
-import { knownReadings } from './known-readings'
-import { namesAnother, type Stamp, stampReadings } from './stamp-readings'
+import { KnownReadings, readingIdsIn } from './known-readings'
+import { stampOverrules } from './stamp-overrules'
+import { type Stamp, stampReadings } from './stamp-readings'
 import { digest, readDocument } from './survey-document'
 import {
   cableNotInCatalogue,
@@ -26,7 +28,7 @@ import {
 
 export interface ChangeRequest {
   survey: SurveyKey
-  person: { id: string; name: string }
+  person: { id: string; name: string; roles: readonly Role[] }
   /** The revision the changes were made on. */
   revision: number
   changes: SurveyChange[]
@@ -80,11 +82,19 @@ async function stampAll(
   { survey, person, now }: ChangeRequest,
   changes: SurveyChange[],
 ): Promise<SurveyChange[]> {
-  const asked = changes.some(({ operation }) => namesAnother(operation, person.name))
-  const history = asked ? await selectReadingOperations(transaction, survey) : []
-  const isKnown = knownReadings(history.map(({ operation }) => surveyOperationSchema.parse(operation)))
-  const stamp: Stamp = { by: person.name, now, isKnown }
-  return changes.map(({ id, operation }) => ({ id, operation: stampReadings(operation, stamp) }))
+  const ids = changes.flatMap(({ operation }) => readingIdsIn(operation))
+  const history = await selectReadingOperations(transaction, survey, ids)
+  const known = new KnownReadings(
+    history.map(({ operation, personId }) => ({
+      operation: surveyOperationSchema.parse(operation),
+      personId,
+    })),
+  )
+  const stamp: Stamp = { person, now, known }
+  return changes.map(({ id, operation }) => ({
+    id,
+    operation: stampReadings(stampOverrules(operation, { person, now }), stamp),
+  }))
 }
 
 function applyAll(survey: Survey, changes: SurveyChange[]): Survey {

@@ -1,21 +1,30 @@
 import type { Reading } from '@shared/schemas/bay'
 import type { ReadingOwner, SimpleOperation, SurveyOperation } from '@shared/survey/survey-operation'
+import type { KnownReadings } from './known-readings'
+import { notYourReading, readingChanged } from './surveys.errors'
 
 export interface Stamp {
-  /** Name of the person who sends the change. */
-  by: string
+  person: { id: string; name: string }
   now: Date
-  /** Whether the survey's history holds this very reading: then it comes back as it was, by undo. */
-  isKnown: (owner: ReadingOwner, reading: Reading) => boolean
+  known: KnownReadings
 }
 
 /**
  * Writes who and when on every reading that a change adds. The sender is believed about the moment, where it is not in
- * the future, since a reading may be sent long after it was taken; never about the person.
+ * the future, since a reading may be sent long after it was taken; never about the person. A reading that the history
+ * holds comes back as it was or not at all, and only who took it may take it back.
+ * @throws AppError `reading-changed`, `not-your-reading`
  */
 export function stampReadings(operation: SurveyOperation, stamp: Stamp): SurveyOperation {
-  if (operation.type !== 'group') return stampOne(operation, stamp)
-  return { ...operation, operations: operation.operations.map((one) => stampOne(one, stamp)) }
+  if (operation.type !== 'group') return stampStep(operation, stamp)
+  return { ...operation, operations: operation.operations.map((step) => stampStep(step, stamp)) }
+}
+
+function stampStep(step: SimpleOperation, stamp: Stamp): SimpleOperation {
+  if (step.type === 'reading.retract') assertOwn(step, stamp)
+  const stamped = stampOne(step, stamp)
+  stamp.known.note(stamped, stamp.person.id)
+  return stamped
 }
 
 function stampOne(operation: SimpleOperation, stamp: Stamp): SimpleOperation {
@@ -35,21 +44,23 @@ function stampOne(operation: SimpleOperation, stamp: Stamp): SimpleOperation {
   return operation
 }
 
-function stampReading(owner: ReadingOwner, reading: Reading, { by, now, isKnown }: Stamp): Reading {
-  if (isKnown(owner, reading)) return reading
+function stampReading(owner: ReadingOwner, reading: Reading, { person, now, known }: Stamp): Reading {
+  const before = known.find(owner, reading.id)?.reading
+  if (before) {
+    if (before.at !== reading.at || before.value !== reading.value) throw readingChanged(owner, reading.id)
+    // Struck or not as it is now: striking came later, and is no part of what was read.
+    const { struck: _struck, ...asTaken } = before
+    return reading.struck === undefined ? asTaken : { ...asTaken, struck: reading.struck }
+  }
   const said = reading.on === undefined ? undefined : new Date(reading.on)
   const on = said && said <= now ? said : now
-  return { ...reading, by, on: on.toISOString() }
+  return { ...reading, by: person.name, on: on.toISOString() }
 }
 
-/** Whether a change brings a reading under another person’s name, so that the history must be asked whether it is theirs. */
-export const namesAnother = (operation: SurveyOperation, by: string): boolean =>
-  (operation.type === 'group' ? operation.operations : [operation])
-    .flatMap(carried)
-    .some((reading) => reading.by !== undefined && reading.by !== by)
-
-const carried = (operation: SimpleOperation): Reading[] => {
-  if (operation.type === 'reading.add') return [operation.reading]
-  if (operation.type === 'bay.add') return operation.bay.readings
-  return operation.type === 'run.add' ? operation.run.readings : []
+/** Undo of a reading just taken, in the same hand; everybody else strikes it with a reason. */
+function assertOwn(
+  { of, id }: Extract<SimpleOperation, { type: 'reading.retract' }>,
+  { person, known }: Stamp,
+): void {
+  if (known.find(of, id)?.personId !== person.id) throw notYourReading(of)
 }

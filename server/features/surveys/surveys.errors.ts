@@ -1,4 +1,5 @@
 import type { z } from 'zod'
+import type { ReadingOwner } from '@shared/survey/survey-operation'
 import type { OperationRefused } from '@shared/survey/operation-refused'
 import type { SurveyTooNew } from '@shared/survey/survey-versions'
 import { AppError, notFound } from '../../errors'
@@ -32,6 +33,28 @@ export const surveyInvalid = (error: z.ZodError) => {
     { fields },
   )
 }
+
+/** Readings are struck and taken again, never altered. */
+export const readingChanged = ({ kind, id: owner }: ReadingOwner, id: string) =>
+  new AppError(
+    422,
+    'reading-changed',
+    `Reading ${id} of ${kind} ${owner} was taken before with another figure. Strike it with a reason, and take a new reading.`,
+  )
+
+export const notYourReading = ({ kind, id }: ReadingOwner) =>
+  new AppError(
+    403,
+    'not-your-reading',
+    `Only who took a reading of ${kind} ${id} can take it back. Strike it with a reason instead; it stays legible.`,
+  )
+
+export const mayNotOverrule = () =>
+  new AppError(
+    403,
+    'may-not-overrule',
+    'Only an owner or estimator can let a stop pass, or make it stand again. Tell one of them what you found.',
+  )
 
 export const cableNotInCatalogue = (runs: readonly { id: string; cable: string }[]) => {
   const cables = [...new Set(runs.map(({ cable }) => cable))].join(', ')

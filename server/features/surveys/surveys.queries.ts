@@ -107,21 +107,28 @@ export const selectHistory = (
     .orderBy(desc(surveyChanges.revision))
     .limit(limit)
 
-/** All changes that may hold a reading, to recognise one that comes back. */
-export const selectReadingOperations = (
+/** The changes that brought readings of these ids, the oldest first, and who made them. */
+export async function selectReadingOperations(
   database: Database,
   { companyId, surveyId }: SurveyKey,
-): Promise<{ operation: unknown }[]> =>
-  database
-    .select({ operation: surveyChanges.operation })
+  readingIds: readonly string[],
+): Promise<{ operation: unknown; personId: string }[]> {
+  if (readingIds.length === 0) return []
+  return database
+    .select({ operation: surveyChanges.operation, personId: surveyChanges.personId })
     .from(surveyChanges)
     .where(
       and(
         eq(surveyChanges.companyId, companyId),
         eq(surveyChanges.surveyId, surveyId),
         sql`${surveyChanges.operation} ->> 'type' in ('reading.add', 'bay.add', 'run.add', 'group')`,
+        // Narrowed by text: the few that name an id elsewhere do no harm.
+        sql`exists (select 1 from jsonb_array_elements_text(${JSON.stringify(readingIds)}::jsonb) as wanted
+          where position(wanted in ${surveyChanges.operation}::text) > 0)`,
       ),
     )
+    .orderBy(surveyChanges.revision)
+}
 
 /** The picture a list shows: the first one marked, else the first one stored. Named in full: columns inside are not. */
 const thumbnailPhotoId = sql<string | null>`(

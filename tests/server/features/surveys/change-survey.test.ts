@@ -111,6 +111,64 @@ describe('changes of a survey', () => {
     expect((await stored()).bays[0]).toEqual(taken)
   })
 
+  it('never let one person alter what another has read, by taking it back and giving it again', async () => {
+    await send(0, [change(post('P1')), change(post('P2')), change(bay), change(reading)])
+    const other = await createPerson(test.database, { companyId: person.companyId, name: 'Odile' })
+    const asOther = (operation: SurveyOperation) =>
+      changeSurvey(test.database, {
+        survey: key(),
+        person: other,
+        revision: 4,
+        changes: [change(operation)],
+        now,
+      })
+    const of = { kind: 'bay', id: 'B1' } as const
+    await expect(asOther({ type: 'reading.retract', of, id: 'r1' })).rejects.toMatchObject({
+      code: 'not-your-reading',
+    })
+    const altered = {
+      ...(await stored()).bays[0]!,
+      readings: [{ id: 'r1', at: 'top' as const, value: inches(64.5) }],
+    }
+    const group = [{ type: 'bay.remove', id: 'B1' } as const, { type: 'bay.add', bay: altered } as const]
+    await expect(asOther({ type: 'group', operations: group })).rejects.toMatchObject({
+      code: 'reading-changed',
+    })
+    expect((await stored()).bays[0]?.readings).toMatchObject([{ id: 'r1', value: inches(46.5), by: 'Imre' }])
+    // Its taker may: undo, and another reading under another id.
+    expect(await send(4, [change({ type: 'reading.retract', of, id: 'r1' })])).toEqual({ revision: 5 })
+  })
+
+  it('let a stop pass only for an owner or estimator, under their own name', async () => {
+    const overrule: SurveyOperation = {
+      type: 'stop.overrule',
+      overrule: {
+        code: 'guard-too-low',
+        where: {},
+        text: 'Too low.',
+        reason: 'A wall stands there',
+        by: 'Odile',
+      },
+    }
+    const surveyor = await createPerson(test.database, { companyId: person.companyId, roles: ['surveyor'] })
+    const estimator = await createPerson(test.database, {
+      companyId: person.companyId,
+      name: 'Tamsin',
+      roles: ['estimator'],
+    })
+    const as = (who: PersonRow, operation: SurveyOperation, revision = 0) =>
+      changeSurvey(test.database, { survey: key(), person: who, revision, changes: [change(operation)], now })
+    for (const operation of [overrule, { type: 'group', operations: [overrule] } as SurveyOperation]) {
+      await expect(as(surveyor, operation)).rejects.toMatchObject({ status: 403, code: 'may-not-overrule' })
+    }
+    await as(estimator, overrule)
+    expect((await stored()).overruled).toMatchObject([{ by: 'Tamsin', on: now.toISOString() }])
+    const uphold: SurveyOperation = { type: 'stop.uphold', code: 'guard-too-low', where: {} }
+    await expect(as(surveyor, uphold, 1)).rejects.toMatchObject({ code: 'may-not-overrule' })
+    await as(estimator, uphold, 1)
+    expect((await stored()).overruled).toEqual([])
+  })
+
   it('may not give a run a cable that the company lacks', async () => {
     await stockCompany(person.companyId, test.database)
     await send(0, [change(post('P1')), change(post('P2')), change(bay)])

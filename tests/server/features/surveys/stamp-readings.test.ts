@@ -2,8 +2,8 @@ import { describe, expect, it } from 'vitest'
 import type { Reading } from '@shared/schemas/bay'
 import type { SurveyOperation } from '@shared/survey/survey-operation'
 import { inches } from '@shared/units/length'
-import { knownReadings } from '../../../../server/features/surveys/known-readings'
-import { namesAnother, stampReadings } from '../../../../server/features/surveys/stamp-readings'
+import { KnownReadings } from '../../../../server/features/surveys/known-readings'
+import { stampReadings } from '../../../../server/features/surveys/stamp-readings'
 
 const now = new Date('2026-05-14T10:00:00Z')
 const of = { kind: 'bay', id: 'B1' } as const
@@ -33,8 +33,22 @@ const bayWith = (...readings: Reading[]): SurveyOperation => ({
   },
 })
 
-const stamp = (operation: SurveyOperation, history: SurveyOperation[] = []) =>
-  stampReadings(operation, { by: 'Imre', now, isKnown: knownReadings(history) })
+const imre = { id: 'imre', name: 'Imre' }
+/** What Imre sends; the history is Odile’s. */
+const stamp = (operation: SurveyOperation, history: SurveyOperation[] = [], person = imre) =>
+  stampReadings(operation, {
+    person,
+    now,
+    known: new KnownReadings(history.map((each) => ({ operation: each, personId: 'odile' }))),
+  })
+const refusal = (act: () => unknown): unknown => {
+  try {
+    act()
+  } catch (error) {
+    return error
+  }
+  return undefined
+}
 const stampedReading = (operation: SurveyOperation) => {
   const stamped = stamp(operation)
   if (stamped.type !== 'reading.add') throw new Error('not a reading')
@@ -72,7 +86,7 @@ describe('who and when on an added reading', () => {
     }
     const group = stamp({
       type: 'group',
-      operations: [add({ by: 'Odile' }), bayWith(reading({ by: 'Odile' })), run] as never,
+      operations: [add({ id: 'r0', by: 'Odile' }), bayWith(reading({ by: 'Odile' })), run] as never,
     })
     expect(JSON.stringify(group)).not.toContain('Odile')
     expect(JSON.stringify(group).match(/"by":"Imre"/g)).toHaveLength(3)
@@ -90,22 +104,52 @@ describe('a reading that comes back by undo', () => {
     )
   })
 
+  it('comes back as it was taken, whatever moment and name it is given now', () => {
+    const again = stamp(bayWith({ ...theirs, by: 'Imre', on: '2026-05-02T08:00:00.000Z' }), [add(theirs)])
+    expect(again).toEqual(bayWith(theirs))
+  })
+
   it.each([
     ['another figure', { value: inches(64.5) }],
     ['another place', { at: 'bottom' as const }],
-    ['another moment', { on: '2026-05-02T08:00:00.000Z' }],
-  ])('is the sender’s with %s', (_what, more) => {
-    const again = stamp(bayWith({ ...theirs, ...more }), [add(theirs)])
-    expect(JSON.stringify(again)).toContain('"by":"Imre"')
+  ])('is refused with %s: a reading is struck, never altered', (_what, more) => {
+    for (const operation of [add({ ...theirs, ...more }), bayWith({ ...theirs, ...more })]) {
+      expect(refusal(() => stamp(operation, [add(theirs)]))).toMatchObject({
+        status: 422,
+        code: 'reading-changed',
+      })
+    }
+  })
+
+  it('is refused with another figure within one gesture as well', () => {
+    const gesture = { type: 'group', operations: [add(), add({ value: inches(64.5) })] } as SurveyOperation
+    expect(refusal(() => stamp(gesture))).toMatchObject({ code: 'reading-changed' })
   })
 })
 
-describe('namesAnother', () => {
-  it('is true only for a reading under another name', () => {
-    expect(namesAnother(add(), 'Imre')).toBe(false)
-    expect(namesAnother(add({ by: 'Imre' }), 'Imre')).toBe(false)
-    expect(namesAnother(add({ by: 'Odile' }), 'Imre')).toBe(true)
-    expect(namesAnother(bayWith(reading({ by: 'Odile' })), 'Imre')).toBe(true)
-    expect(namesAnother({ type: 'post.remove', id: 'P1' }, 'Imre')).toBe(false)
+describe('taking a reading back', () => {
+  const back: SurveyOperation = { type: 'reading.retract', of, id: 'r1' }
+
+  it('is for who took it', () => {
+    expect(stamp(back, [add()], { id: 'odile', name: 'Odile' })).toEqual(back)
+    expect(stamp({ type: 'group', operations: [add(), back] as never })).toBeTruthy()
+  })
+
+  it('is refused to everybody else, in a group too, and for a reading nobody is known to have taken', () => {
+    const notYours = { status: 403, code: 'not-your-reading' }
+    expect(refusal(() => stamp(back, [add()]))).toMatchObject(notYours)
+    expect(refusal(() => stamp({ type: 'group', operations: [back] as never }, [add()]))).toMatchObject(
+      notYours,
+    )
+    expect(refusal(() => stamp(back))).toMatchObject(notYours)
+  })
+
+  it('stays who took it when somebody else brought the bay back by undo', () => {
+    const history = [
+      { operation: add(), personId: 'imre' },
+      { operation: bayWith(reading()), personId: 'odile' },
+    ]
+    const known = new KnownReadings(history)
+    expect(stampReadings(back, { person: imre, now, known })).toEqual(back)
   })
 })

@@ -1,9 +1,10 @@
 import { and, asc, eq } from 'drizzle-orm'
-import type { Database } from '../../database/client'
-import { cables, fittings } from '../../database/tables/hardware'
+import type { Database } from './client'
+import { guardRules } from './tables/guard-rules'
+import { cables, fittings } from './tables/hardware'
 
-/** The two kinds of entry are kept alike. */
-const tables = { cable: cables, fitting: fittings }
+/** The kinds of entry of a company’s catalogue are kept alike. */
+const tables = { cable: cables, fitting: fittings, 'guard rules': guardRules }
 export type EntryKind = keyof typeof tables
 
 export interface EntryRow {
