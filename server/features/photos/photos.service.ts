@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto'
 import type { PhotoRecord } from '@shared/schemas/survey-record'
 import { type PhotoStorage, photoKey, type PictureSize } from '../../adapters/photo-storage'
 import type { Database } from '../../database/client'
-import { assertSurvey, holdSurvey } from '../surveys/hold-survey.service'
+import { assertSurvey, holdSurvey, removedPhotos } from '../surveys/hold-survey.service'
 import type { UploadedFile } from './inspect-photo'
 import { nextPhotoId } from './next-photo-id'
 import { photoName } from './photo-name'
@@ -61,16 +61,20 @@ async function insertRow(
   { id, photo, prepared }: { id: string; photo: NewPhoto; prepared: PreparedPhoto },
 ): Promise<PhotoRecord> {
   const survey = { companyId: photo.companyId, surveyId: photo.surveyId }
-  const { photos: marked } = await holdSurvey(transaction, survey)
+  const document = await holdSurvey(transaction, survey)
   const stored = await selectSurveyPhotos(transaction, survey)
-  if (stored.length >= MAX_PHOTOS) throw tooManyPhotos(MAX_PHOTOS)
+  if (stored.length >= MAX_PHOTOS) {
+    const removed = await removedPhotos(transaction, survey, document)
+    const kept = stored.filter(({ surveyPhotoId }) => !removed.has(surveyPhotoId))
+    if (kept.length >= MAX_PHOTOS) throw tooManyPhotos(MAX_PHOTOS)
+  }
   const { takenAt, focalLength35, place } = prepared.details
   return toPhotoRecord(
     await insertPhoto(transaction, {
       ...survey,
       id,
       surveyPhotoId: nextPhotoId([
-        ...marked.map((known) => known.id),
+        ...document.photos.map((known) => known.id),
         ...stored.map(({ surveyPhotoId }) => surveyPhotoId),
       ]),
       name: photoName(photo.file.name),

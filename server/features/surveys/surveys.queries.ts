@@ -130,6 +130,27 @@ export async function selectReadingOperations(
     .orderBy(surveyChanges.revision)
 }
 
+/** The ids of photos that a change has taken out, alone or in a group; a later one may have brought some back. */
+export async function selectRemovedPhotoIds(
+  database: Database,
+  { companyId, surveyId }: SurveyKey,
+): Promise<string[]> {
+  const rows = await database
+    .select({
+      ids: sql<string[]>`jsonb_path_query_array(${surveyChanges.operation},
+        '$.**{0 to 2} ? (@.type == "photo.remove").id')`,
+    })
+    .from(surveyChanges)
+    .where(
+      and(
+        eq(surveyChanges.companyId, companyId),
+        eq(surveyChanges.surveyId, surveyId),
+        sql`position('photo.remove' in ${surveyChanges.operation}::text) > 0`,
+      ),
+    )
+  return rows.flatMap(({ ids }) => ids)
+}
+
 /** The picture a list shows: the first one marked, else the first one stored. Named in full: columns inside are not. */
 const thumbnailPhotoId = sql<string | null>`(
   select p.id from photos p

@@ -1,11 +1,15 @@
+import { randomUUID } from 'node:crypto'
 import { readFileSync } from 'node:fs'
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest'
+import type { SurveyOperation } from '@shared/survey/survey-operation'
 import {
   memoryPhotoStorage,
   type MemoryPhotoStorage,
 } from '../../../../server/adapters/fakes/memory-photo-storage'
 import { photos } from '../../../../server/database/tables/photos'
 import { addPhoto, readPicture } from '../../../../server/features/photos/photos.service'
+import { changeSurvey } from '../../../../server/features/surveys/change-survey.service'
+import { createPerson } from '../../../factories/person'
 import { createPhotoRow } from '../../../factories/photo'
 import { jpegBytes } from '../../../factories/picture'
 import { createSurveyRow, emptySurvey, type SurveyRow } from '../../../factories/survey-record'
@@ -33,6 +37,17 @@ const add = (bytes: Buffer, more: { keepPlace?: boolean; surveyId?: string; name
     file: { bytes, name: more.name ?? 'stair.jpg', mediaType: 'image/jpeg' },
     keepPlace: more.keepPlace ?? false,
   })
+/** Sends changes of the survey one after another, as a surveyor does. */
+async function changer() {
+  const person = await createPerson(test.database, { companyId: survey.companyId })
+  let revision = 0
+  return async (...operations: SurveyOperation[]) => {
+    const changes = operations.map((operation) => ({ id: randomUUID(), operation }))
+    const key = { companyId: survey.companyId, surveyId: survey.id }
+    const request = { survey: key, person, revision, changes, now: new Date() }
+    revision = (await changeSurvey(test.database, request)).revision
+  }
+}
 const rows = () => test.database.select().from(photos)
 
 describe('adding a photo', () => {
@@ -92,10 +107,29 @@ describe('adding a photo', () => {
     expect(photoStorage.keys()).toEqual([])
   })
 
-  it('stops at a hundred', async () => {
+  const fill = async () => {
     for (let i = 1; i <= 100; i += 1) await createPhotoRow(test.database, survey, { surveyPhotoId: `F${i}` })
+  }
+
+  it('stops at a hundred', async () => {
+    await fill()
     await expect(add(await jpegBytes())).rejects.toMatchObject({ status: 409, code: 'photo-too-many' })
     expect(photoStorage.keys()).toEqual([])
+  })
+
+  it('counts only what the survey still has: one removed makes room for one, and none once it is back', async () => {
+    await fill()
+    const change = await changer()
+    const photos = ['F1', 'F2'].map((id) => ({ id, file: 'deck.jpg', posts: {} }))
+    await change(...photos.map((photo) => ({ type: 'photo.add' as const, photo })))
+    await change({ type: 'photo.remove', id: 'F1' })
+    const gesture = [{ type: 'photo.remove' as const, id: 'F2' }]
+    await change({ type: 'group', operations: gesture })
+    await change({ type: 'photo.add', photo: photos[1]! })
+    expect((await add(await jpegBytes())).surveyPhotoId).toBe('F101')
+    await expect(add(await jpegBytes())).rejects.toMatchObject({ code: 'photo-too-many' })
+    await change({ type: 'group', operations: gesture })
+    expect((await add(await jpegBytes())).surveyPhotoId).toBe('F102')
   })
 })
 
