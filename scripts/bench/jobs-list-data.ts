@@ -24,7 +24,7 @@ export async function fillWithJobs({ database, sql }: OpenDatabase, count: numbe
     companyId: company.id,
     name: `Person ${i}`,
     email: `person-${i}@example.com`,
-    roles: (i === 0 ? ['owner'] : ['surveyor']) satisfies Role[] as Role[],
+    roles: (i === 0 ? ['owner'] : ['surveyor']) satisfies Role[],
   }))
   const passwordHash = await hash(password, 10)
   const made = await database

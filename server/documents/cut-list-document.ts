@@ -1,5 +1,6 @@
 import type { CutList } from '@shared/cut-list/cut-list-rows'
 import type { CablePick, FittingPick } from '@shared/cut-list/fittings-to-pick'
+import type { JudgedFinding } from './judged-finding'
 import type { Units } from '@shared/schemas/quantities'
 
 /** All that a printed or exported cut list says. */
@@ -10,12 +11,14 @@ export interface CutListDocument {
   surveyTitle: string
   /** Of the survey, so that an old print can be told from a current one. */
   revision: number
-  /** The day it was made, `2026-05-14`. */
-  date: string
+  /** When it was made, `2026-05-14 10:12 UTC`. */
+  made: string
   units: Units['length']
   /** The company's finest fraction of an inch in lists. */
   fraction: 16 | 32 | 64
   cutList: CutList
+  /** All findings, the checks' too, the gravest first. */
+  findings: readonly JudgedFinding[]
   picks: { fittings: FittingPick[]; cables: CablePick[] }
 }
 

@@ -1,6 +1,5 @@
 import type { CutListRow } from '@shared/cut-list/cut-list-rows'
 import type { WhyNone } from '@shared/calculation/result'
-import type { Finding } from '@shared/schemas/finding'
 import { formatLength, lengthText } from '@shared/units/format-length'
 import { toInches, toMillimetres } from '@shared/units/length'
 import type { CutListDocument } from './cut-list-document'
@@ -39,10 +38,10 @@ const SITE_NOTE = 'Crimp one end; cut the second on site at the mark.'
 
 /** The cut list as lines, run by run, the lowest cable first. */
 export function cutListLines({ cutList, units }: CutListDocument): CutListLine[] {
-  return cutList.groups.flatMap((group) => group.rows.map((row) => toLine(row, group.findings, units)))
+  return cutList.groups.flatMap((group) => group.rows.map((row) => toLine(row, units)))
 }
 
-function toLine(row: CutListRow, findings: Finding[], units: CutListDocument['units']): CutListLine {
+function toLine(row: CutListRow, units: CutListDocument['units']): CutListLine {
   const { cable } = row
   const written = (nm: number | undefined) => (nm === undefined ? undefined : inUnits(nm, units))
   return {
@@ -59,7 +58,7 @@ function toLine(row: CutListRow, findings: Finding[], units: CutListDocument['un
     planned: written(cable.planned),
     worst: written(cable.worst),
     limit: written(cable.limit),
-    note: note(row, findings),
+    note: note(row),
   }
 }
 
@@ -68,9 +67,8 @@ const feetText = (nm: number | undefined): string | undefined =>
 
 const end = (post: string, fitting: string | undefined): string => (fitting ? `${post}: ${fitting}` : post)
 
-/** What the bench must know of this one cable; findings about the whole run have their own sheet. */
-function note({ cable }: CutListRow, findings: Finding[]): string {
-  const first = cable.mode === 'none' ? whyNone[cable.why] : cable.mode === 'site' ? SITE_NOTE : ''
-  const own = findings.filter(({ where }) => where.cable === cable.cable).map(({ text }) => text)
-  return [first, ...own].filter((part) => part !== '').join(' ')
+/** What the bench must know of this one cable; findings have their own sheet. */
+function note({ cable }: CutListRow): string {
+  if (cable.mode === 'none') return whyNone[cable.why]
+  return cable.mode === 'site' ? SITE_NOTE : ''
 }

@@ -1,18 +1,15 @@
 import type { CutListDocument } from './cut-list-document'
 
-const denominators = [16, 32, 64] as const
+/** The finest fraction that two digits under the line hold. */
+const FINEST = 64
 
 /**
- * Spreadsheet number format for lengths that must not be shown shorter or longer than they are: the company's
- * fraction, a finer one where a length needs it, decimals where no fraction shows it exactly. Millimetres to 0.1.
+ * Spreadsheet number format for lengths that must not be shown shorter or longer than they are: a fraction in lowest
+ * terms where each is one to 1/64, decimals where not. Millimetres to 0.1.
  */
-export function lengthFormat(lengths: readonly number[], { units, fraction }: FormatChoice): string {
+export function lengthFormat(lengths: readonly number[], { units }: Pick<FormatChoice, 'units'>): string {
   if (units === 'mm') return lengths.every(isTenth) ? '0.0' : '0.000'
-  const exact = denominators.find(
-    (denominator) =>
-      denominator >= fraction && lengths.every((length) => Number.isInteger(length * denominator)),
-  )
-  return exact ? `# ??/${exact}` : '0.0000'
+  return lengths.every((length) => Number.isInteger(length * FINEST)) ? '# ??/??' : '0.0000'
 }
 
 type FormatChoice = Pick<CutListDocument, 'units' | 'fraction'>

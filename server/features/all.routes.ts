@@ -3,6 +3,7 @@ import type { Services } from '../services'
 import { companyRoutes } from './company/company.routes'
 import { cutListRoutes } from './cut-list/cut-list.routes'
 import { guardRulesRoutes } from './guard-rules/guard-rules.routes'
+import { guardSummaryRoutes } from './guard-summary/guard-summary.routes'
 import { hardwareRoutes } from './hardware/hardware.routes'
 import { houseRulesRoutes } from './house-rules/house-rules.routes'
 import { jobsRoutes } from './jobs/jobs.routes'
@@ -24,5 +25,6 @@ export function featureRoutes(router: Router, services: Services): void {
   cutListRoutes(router, services)
   hardwareRoutes(router, services)
   guardRulesRoutes(router, services)
+  guardSummaryRoutes(router, services)
   houseRulesRoutes(router, services)
 }

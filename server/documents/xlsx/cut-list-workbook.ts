@@ -10,7 +10,7 @@ export async function cutListWorkbook(document: CutListDocument): Promise<Buffer
   const workbook = new ExcelJS.Workbook()
   workbook.creator = 'Tautbook'
   workbook.title = safeText(`Cut list, job ${document.jobNumber} ${document.jobTitle}`)
-  workbook.created = new Date(`${document.date}T00:00:00Z`)
+  workbook.created = new Date(document.made.replace(' UTC', 'Z').replace(' ', 'T'))
   workbook.modified = workbook.created
   addCutListSheet(workbook, document)
   addPickSheet(workbook, document)

@@ -1,26 +1,27 @@
 import type { Workbook } from 'exceljs'
-import { type Finding, type FindingLevel } from '@shared/schemas/finding'
 import type { CutListDocument } from '../cut-list-document'
+import { type JudgedFinding, overrulingText } from '../judged-finding'
 import { addTable } from './sheet'
-
-const order: Record<FindingLevel, number> = { stop: 0, check: 1, note: 2 }
 
 /** Everything the tool noticed, what stops the work first. */
 export function addFindingsSheet(workbook: Workbook, document: CutListDocument): void {
-  const { groups, findings } = document.cutList
-  const lines = [...findings, ...groups.flatMap((group) => group.findings)].sort(
-    (a, b) => order[a.level] - order[b.level],
-  )
-  addTable<Finding>(workbook, document, {
+  const lines = document.findings
+  addTable<JudgedFinding>(workbook, document, {
     name: 'Findings',
     columns: [
-      { header: 'Level', value: ({ level }) => level, widest: 8 },
-      { header: 'Run', value: ({ where }) => where.run, widest: 14 },
-      { header: 'Cable', value: ({ where }) => where.cable, widest: 6, format: '0' },
-      { header: 'Bay', value: ({ where }) => where.bay, widest: 14 },
-      { header: 'Post', value: ({ where }) => where.post, widest: 14 },
-      { header: 'Finding', value: ({ text }) => text, widest: 90, wrap: true },
-      { header: 'Code', value: ({ code }) => code, widest: 26 },
+      { header: 'Level', value: ({ finding }) => finding.level, widest: 8 },
+      { header: 'Run', value: ({ finding }) => finding.where.run, widest: 14 },
+      { header: 'Bay', value: ({ finding }) => finding.where.bay, widest: 14 },
+      { header: 'Post', value: ({ finding }) => finding.where.post, widest: 14 },
+      { header: 'Finding', value: ({ finding }) => finding.text, widest: 80, wrap: true },
+      { header: 'Rule', value: ({ finding }) => finding.rule, widest: 40, wrap: true },
+      {
+        header: 'Overruled',
+        value: ({ overruling }) => (overruling ? overrulingText(overruling) : undefined),
+        widest: 40,
+        wrap: true,
+      },
+      { header: 'Code', value: ({ finding }) => finding.code, widest: 26 },
     ],
     lines,
     closing: lines.length === 0 ? ['Nothing was noticed.'] : [],

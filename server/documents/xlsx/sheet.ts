@@ -16,7 +16,7 @@ export interface SheetColumn<Line> {
 interface Table<Line> {
   name: string
   columns: SheetColumn<Line>[]
-  lines: Line[]
+  lines: readonly Line[]
   /** Lines where this changes get a rule above them. */
   group?: (line: Line) => string
   /** Stands under the table. */
@@ -107,7 +107,7 @@ const headerText = (text: string, longest: number): string =>
     .replaceAll('&', '&&')
 
 function setUpPrint(sheet: Worksheet, document: CutListDocument, name: string): void {
-  const { jobNumber, jobTitle, surveyTitle, revision, date, company } = document
+  const { jobNumber, jobTitle, surveyTitle, revision, made, company } = document
   Object.assign(sheet.pageSetup, {
     orientation: 'landscape',
     paperSize: document.units === 'in' ? LETTER : A4,
@@ -119,7 +119,7 @@ function setUpPrint(sheet: Worksheet, document: CutListDocument, name: string): 
   })
   const job = `Job ${jobNumber}  ${headerText(jobTitle, 50)}`
   const survey = `${headerText(surveyTitle, 30)}, revision ${revision}`
-  sheet.headerFooter.oddHeader = `&L${job}&C${name}&R${survey}  ${date}`
+  sheet.headerFooter.oddHeader = `&L${job}&C${name}&R${survey}  ${made}`
   sheet.headerFooter.oddFooter = `&L&8${SHORT_CAUTION}\n${headerText(company, 30)}&R&8\nPage &P of &N`
 }
 

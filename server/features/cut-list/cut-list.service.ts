@@ -1,9 +1,13 @@
+import { allFindings } from '@shared/calculation/all-findings'
 import { calculateSurvey } from '@shared/calculation/calculate-survey'
+import { checkSurvey } from '@shared/calculation/checks/check-survey'
 import { cutListRows } from '@shared/cut-list/cut-list-rows'
 import { fittingsToPick } from '@shared/cut-list/fittings-to-pick'
 import type { Company } from '@shared/schemas/company'
 import type { Database } from '../../database/client'
 import type { CutListDocument } from '../../documents/cut-list-document'
+import { judge } from '../../documents/judged-finding'
+import { momentText } from '../../documents/moment-text'
 import { readCalculationInput } from '../surveys/export-survey.service'
 
 export interface CutListRequest {
@@ -25,10 +29,11 @@ export async function readCutList(
     jobTitle: record.jobTitle,
     surveyTitle: record.survey.title,
     revision: record.revision,
-    date: now.toISOString().slice(0, 10),
+    made: momentText(now),
     units: record.survey.units.length,
     fraction: company.fraction,
     cutList: cutListRows(result, input),
+    findings: judge(record.survey, allFindings(result, checkSurvey(input))),
     picks: fittingsToPick(result, input),
   }
 }

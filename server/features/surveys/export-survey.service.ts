@@ -1,20 +1,24 @@
 import { writeSurveyFile } from '@shared/schemas/survey-file'
 import type { SurveyRecord } from '@shared/schemas/survey-record'
 import type { Database } from '../../database/client'
+import { ownGuardRules } from '../guard-rules/guard-rules.service'
 import { hardwareFor } from '../hardware/hardware.service'
 import { readHouseRules } from '../house-rules/house-rules.service'
 import type { SurveyKey } from './surveys.queries'
 import { readSurvey } from './surveys.service'
 
-/** What is calculated from: a survey, the hardware it may use and the company's rules. */
+/** What is calculated from: a survey, the hardware it may use, the company's rules and own guard rules it names. */
 export async function readCalculationInput(database: Database, key: SurveyKey) {
   const record = await readSurvey(database, key)
   const used = new Set(record.survey.runs.map(({ cable }) => cable))
-  const [hardware, rules] = await Promise.all([
+  const [hardware, rules, own] = await Promise.all([
     hardwareFor({ database, companyId: key.companyId }, used),
     readHouseRules(database, key.companyId),
+    ownGuardRules({ database, companyId: key.companyId }),
   ])
-  return { record, input: { survey: record.survey, hardware, rules } }
+  const named = own.filter(({ id }) => id === record.survey.guard.rules)
+  const guardRules = named.length > 0 ? named : undefined
+  return { record, input: { survey: record.survey, hardware, rules, guardRules } }
 }
 
 /** The survey file, in the survey's units, with all that its cut list depends on. */

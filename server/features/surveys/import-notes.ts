@@ -1,4 +1,6 @@
 import { isDeepStrictEqual } from 'node:util'
+import { findRules } from '@shared/calculation/guard-rules/published-rules'
+import type { GuardRules } from '@shared/schemas/guard-rules'
 import type { Hardware } from '@shared/schemas/hardware'
 import type { HouseRules } from '@shared/schemas/house-rules'
 import type { SurveyFile } from '@shared/schemas/survey-file'
@@ -7,11 +9,19 @@ import type { SurveyFile } from '@shared/schemas/survey-file'
 export interface CompanySide {
   hardware: Hardware
   rules: HouseRules
+  /** Its own, retired ones too. */
+  guardRules?: GuardRules[]
 }
 
 /** What of a survey file was not taken over, one sentence each: the company's hardware, rules and pictures stay its own. */
 export function importNotes(file: SurveyFile, company: CompanySide): string[] {
-  return [...hardwareNotes(file, company.hardware), ...rulesNotes(file, company.rules), ...photoNotes(file)]
+  return [
+    ...hardwareNotes(file, company.hardware),
+    ...rulesNotes(file, company.rules),
+    ...guardRulesNotes(file, company.guardRules ?? []),
+    ...overruledNotes(file),
+    ...photoNotes(file),
+  ]
 }
 
 function hardwareNotes({ hardware }: SurveyFile, own: Hardware): string[] {
@@ -50,8 +60,31 @@ const figures = (item: { name: string; price?: number }): unknown =>
   JSON.parse(JSON.stringify({ ...item, name: undefined, price: undefined }))
 
 const rulesNotes = ({ rules }: SurveyFile, own: HouseRules): string[] =>
-  rules && !isDeepStrictEqual(JSON.parse(JSON.stringify(rules)), JSON.parse(JSON.stringify(own)))
-    ? ['The file’s house rules differ from yours. Yours are used.']
+  rules && !sameFigures(rules, own) ? ['The file’s house rules differ from yours. Yours are used.'] : []
+
+/** The survey keeps the name of its rules; whose figures those are is the company’s matter. */
+function guardRulesNotes({ survey, guardRules = [] }: SurveyFile, own: readonly GuardRules[]): string[] {
+  const { rules: id } = survey.guard
+  const [theirs, ours] = [guardRules.find((each) => each.id === id), findRules(id, own)]
+  if (!ours) {
+    return [
+      `The survey follows the guard rules “${id}”, which you do not have. They were not added: choose others on the guard, or make your own.`,
+    ]
+  }
+  return theirs && !sameFigures(theirs, ours)
+    ? [`The file describes the guard rules “${id}” otherwise than yours. Yours are used.`]
+    : []
+}
+
+const sameFigures = (a: unknown, b: unknown): boolean =>
+  isDeepStrictEqual(JSON.parse(JSON.stringify(a)), JSON.parse(JSON.stringify(b)))
+
+/** Whoever answers for it lets a stop pass here anew. */
+const overruledNotes = ({ survey: { overruled } }: SurveyFile): string[] =>
+  overruled.length > 0
+    ? [
+        `${overruled.length === 1 ? 'One stop was' : `${overruled.length} stops were`} overruled where the file comes from. Here ${overruled.length === 1 ? 'it stands' : 'they stand'} again until an owner or estimator overrules ${overruled.length === 1 ? 'it' : 'them'}.`,
+      ]
     : []
 
 const photoNotes = ({ survey }: SurveyFile): string[] =>

@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto'
 import type { Survey } from '@shared/schemas/survey'
 import type { SurveyRecord } from '@shared/schemas/survey-record'
 import type { Database } from '../../database/client'
+import { ownGuardRules } from '../guard-rules/guard-rules.service'
 import { listHardware } from '../hardware/hardware.service'
 import { readHouseRules } from '../house-rules/house-rules.service'
 import { importNotes } from './import-notes'
@@ -23,7 +24,7 @@ export interface ImportRequest {
 
 /**
  * Begins a survey from a survey file. Everything is checked before anything is written; what is not taken over
- * (hardware, rules and pictures) is said in notes. Readings keep who and when the file names: it is a record made
+ * (hardware, rules, pictures and overruled stops) is said in notes. Readings keep who and when the file names: it is a record made
  * elsewhere, and the history says who brought it in.
  */
 export async function importSurvey(
@@ -38,8 +39,12 @@ export async function importSurvey(
     fittings: fittings.map(({ fitting }) => fitting),
   }
   const file = readImport(input, new Set(hardware.cables.map(({ id }) => id)))
-  const notes = importNotes(file, { hardware, rules: await readHouseRules(database, companyId) })
-  const surveyId = await write(database, request, { ...file.survey, photos: [] })
+  const notes = importNotes(file, {
+    hardware,
+    rules: await readHouseRules(database, companyId),
+    guardRules: await ownGuardRules({ database, companyId }),
+  })
+  const surveyId = await write(database, request, { ...file.survey, photos: [], overruled: [] })
   return { survey: await readSurvey(database, { companyId, surveyId }), notes }
 }
 

@@ -1,13 +1,17 @@
 import type { HouseRules } from '../../schemas/house-rules'
 import { thermalTensionChange } from '../cable-properties'
+import type { Opening } from '../guard-opening'
 import { type CheckedRun, fittingsOf } from './checked-run'
 
-/** What is checked of a run as a whole; N. */
+/** What is checked of a run as a whole; N and nm. */
 export interface RunCheck {
   run: string
   /** Id in the catalogue. */
   cable: string
-  cables: number
+  /** Of its cables’ centres, from the lowest up. */
+  heights: readonly number[]
+  /** What the cables fill. */
+  opening: Opening
   tension: number
   /** The tension at the house's cold and hot design temperatures. */
   whenCold: number
@@ -34,7 +38,8 @@ export function checkRun(run: CheckedRun, rules: HouseRules): RunCheck {
   return {
     run: figures.course.run.id,
     cable: cable.id,
-    cables: heights.length,
+    heights,
+    opening: figures.opening,
     tension,
     whenCold: at(rules.coldest),
     whenHot: at(rules.hottest),

@@ -1,5 +1,6 @@
 import ExcelJS from 'exceljs'
 import readWorkbook from 'read-excel-file/node'
+import { format } from 'ssf'
 import { describe, expect, it } from 'vitest'
 import type { CutListDocument } from '../../../server/documents/cut-list-document'
 import { cutListWorkbook } from '../../../server/documents/xlsx/cut-list-workbook'
@@ -56,13 +57,13 @@ describe('the workbook of the worked example', () => {
   })
 
   it('has findings as rows, or says that there is none', async () => {
-    const none = (await readBack(cutListDocument(workedExample()))).get('Findings') ?? []
+    const none = (await readBack(cutListDocument(workedExample(), { findings: [] }))).get('Findings') ?? []
     expect(none.at(-1)?.[0]).toBe('Nothing was noticed.')
     const input = workedExample()
     input.survey.bays[1]!.readings = []
     const [, first] = (await readBack(cutListDocument(input))).get('Findings') ?? []
     expect(first?.slice(0, 2)).toEqual(['stop', 'R1'])
-    expect(first?.[5]).toMatch(/bay B2 has no reading/)
+    expect(first?.[4]).toMatch(/bay B2 has no reading/)
   })
 
   it('says of a cable without a length why it has none', async () => {
@@ -76,16 +77,19 @@ describe('the workbook of the worked example', () => {
 })
 
 describe('how lengths are shown', () => {
-  it('uses the company’s fraction, or a finer one that a length needs', async () => {
-    const cutFormat = async (document: CutListDocument) => (await setUp(document)).getCell('E2').numFmt
-    expect(await cutFormat(cutListDocument(workedExample()))).toBe('# ??/16')
-    expect(await cutFormat(cutListDocument(workedExample(), { fraction: 32 }))).toBe('# ??/32')
+  it('shows fractions in lowest terms, as a second library displays them, and decimals where none is exact', async () => {
+    const cut = async (document: CutListDocument) => (await setUp(document)).getCell('E11')
+    const shown = ({ numFmt, value }: { numFmt: string; value: unknown }): string =>
+      format(numFmt, Number(value)).replace(/\s+/g, ' ').trim()
+    // Cable 10 of the worked example: 95 3/4 in; with a finer step 95 47/64 in.
+    expect(shown(await cut(cutListDocument(workedExample())))).toBe('95 3/4')
     const fine = workedExample()
     fine.rules = { ...fine.rules, cutStep: inches(1 / 64) }
-    expect(await cutFormat(cutListDocument(fine))).toBe('# ??/64')
+    expect(shown(await cut(cutListDocument(fine)))).toBe('95 47/64')
     const odd = workedExample()
     odd.rules = { ...odd.rules, cutStep: millimetres(1) }
-    expect(await cutFormat(cutListDocument(odd))).toBe('0.0000')
+    // 2432 mm are 95.7480 in.
+    expect(shown(await cut(cutListDocument(odd)))).toBe('95.7480')
   })
 
   it('writes plain millimetres for a metric survey', async () => {

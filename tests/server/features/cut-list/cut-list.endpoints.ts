@@ -2,15 +2,8 @@ import { parse } from 'csv-parse/sync'
 import readWorkbook from 'read-excel-file/node'
 import { expect } from 'vitest'
 import { surveys } from '@shared/endpoints/surveys'
-import { createSurveyRow } from '../../../factories/survey-record'
-import { workedExample } from '../../../factories/worked-example'
 import type { EndpointCase } from '../../../support/endpoint-cases'
-import type { Scene } from '../../../support/scene'
-
-const surveyHere = async ({ database, here }: Scene) => {
-  const row = await createSurveyRow(database, { companyId: here.company.id, survey: workedExample().survey })
-  return { surveyId: row.id }
-}
+import { surveyHere } from '../../../support/survey-here'
 
 /** The worked example’s lengths by the starter hardware: its short sleeve is the same, and no cut depends on stiffness. */
 const cuts = { 10: 95.75, 11: 95.8125 }
