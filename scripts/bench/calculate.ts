@@ -1,4 +1,3 @@
-import { performance } from 'node:perf_hooks'
 import { setFlagsFromString } from 'node:v8'
 import { runInNewContext } from 'node:vm'
 import { calculateSurvey } from '../../shared/calculation/calculate-survey'
@@ -6,6 +5,7 @@ import { starterHardware } from '../../shared/calculation/starter-hardware'
 import { starterRules } from '../../shared/calculation/starter-rules'
 import type { CalculationInput } from '../../shared/calculation/survey-index'
 import { readSurveyFile } from '../../shared/schemas/survey-file'
+import { medianMs, rounded } from './measure'
 
 const RUNS = 200
 const BAYS_PER_RUN = 3
@@ -77,22 +77,11 @@ function referenceLoop(): number {
   return out.reduce((sum, value) => sum + value, 0)
 }
 
-function medianMs(work: () => unknown): number {
-  const times = Array.from({ length: REPEATS }, () => {
-    const start = performance.now()
-    work()
-    return performance.now() - start
-  }).sort((a, b) => a - b)
-  return times[Math.floor(times.length / 2)] ?? NaN
-}
-
 /** A full collection, so that what is measured is what is kept. */
 function collectGarbage(): () => void {
   setFlagsFromString('--expose-gc')
   return runInNewContext('gc') as () => void
 }
-
-const rounded = (value: number, digits = 3): number => Number(value.toFixed(digits))
 
 /** `calculateSurvey` over 200 runs of 12 cables: median time, against a plain loop in the same run, and heap growth. */
 // eslint-disable-next-line @typescript-eslint/require-await -- benches share one asynchronous shape
@@ -105,10 +94,10 @@ export async function benchCalculate(): Promise<Record<string, unknown>> {
   }
   collect()
   const heapBefore = process.memoryUsage().heapUsed
-  const median = medianMs(() => calculateSurvey(input))
+  const median = medianMs(REPEATS, () => calculateSurvey(input))
   collect()
   const heapGrowth = process.memoryUsage().heapUsed - heapBefore
-  const reference = medianMs(referenceLoop)
+  const reference = medianMs(REPEATS, referenceLoop)
   const result = calculateSurvey(input)
   return {
     runs: result.runs.length,

@@ -1,6 +1,8 @@
 /** A source file, by name without folder: `tape-limit.ts`. */
 export interface SourceFile {
   name: string
+  /** The folder below shared/calculation, `checks/`. */
+  place?: string
   text: string
 }
 
@@ -64,12 +66,17 @@ const titleOf = (file: string): string => {
   return words.charAt(0).toUpperCase() + words.slice(1)
 }
 
-function page(file: string, described: readonly Described[]): string {
+function page({ name: file, place = '' }: SourceFile, described: readonly Described[]): string {
   const parts = described.map(({ name, summary, fields }) =>
     [`## ${name}`, summary, ...fields.map(([label, text]) => `**${label}**: ${text}`)].join('\n\n'),
   )
   return (
-    [`# ${titleOf(file)}`, `From \`shared/calculation/${file}\`; written by \`npm run docs\`.`, ...parts, '']
+    [
+      `# ${titleOf(file)}`,
+      `From \`shared/calculation/${place}${file}\`; written by \`npm run docs\`.`,
+      ...parts,
+      '',
+    ]
       .join('\n\n')
       .trimEnd() + '\n'
   )
@@ -79,9 +86,9 @@ function page(file: string, described: readonly Described[]): string {
 export function calculationPages(sources: readonly SourceFile[]): Page[] {
   const described = [...sources]
     .sort((a, b) => (a.name < b.name ? -1 : 1))
-    .map(({ name, text }) => ({ name, calculations: describedIn(text) }))
+    .map((source) => ({ source, calculations: describedIn(source.text) }))
     .filter(({ calculations }) => calculations.length > 0)
-  const list = described.map(({ name, calculations }) => {
+  const list = described.map(({ source: { name }, calculations }) => {
     const about = calculations[0]?.summary.split('\n\n')[0] ?? ''
     return `- [${titleOf(name)}](${name.replace(/\.ts$/, '.md')}): ${about}`
   })
@@ -90,9 +97,9 @@ export function calculationPages(sources: readonly SourceFile[]): Page[] {
   const index = { name: 'README.md', text: ['# Calculations', intro, list.join('\n')].join('\n\n') + '\n' }
   return [
     index,
-    ...described.map(({ name, calculations }) => ({
-      name: name.replace(/\.ts$/, '.md'),
-      text: page(name, calculations),
+    ...described.map(({ source, calculations }) => ({
+      name: source.name.replace(/\.ts$/, '.md'),
+      text: page(source, calculations),
     })),
   ]
 }

@@ -9,6 +9,8 @@ export const pagesFolder = fileURLToPath(new URL('../../docs/calculations/', imp
 
 /** The files of shared/calculation that the pages are written from. */
 export const readCalculations = (): SourceFile[] =>
-  readdirSync(folder)
-    .filter((name) => name.endsWith('.ts'))
-    .map((name) => ({ name, text: readFileSync(`${folder}${name}`, 'utf8') }))
+  ['', 'checks/'].flatMap((place) =>
+    readdirSync(`${folder}${place}`)
+      .filter((name) => name.endsWith('.ts'))
+      .map((name) => ({ name, place, text: readFileSync(`${folder}${place}${name}`, 'utf8') })),
+  )

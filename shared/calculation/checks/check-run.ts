@@ -28,6 +28,8 @@ export interface RunCheck {
  * Formula: `T + EA · α · (tensionedAt − temperature)`.
  * Units: N; temperatures in °C.
  * Source: section 7 of the calculation.
+ *
+ * @example 150 lbf at 15 °C, EA 151 000 lbf: 222.48 lbf at −15 °C
  */
 export function checkRun(run: CheckedRun, rules: HouseRules): RunCheck {
   const { figures, cable, heights } = run

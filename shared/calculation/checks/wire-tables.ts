@@ -28,7 +28,7 @@ const NOISE = 1e-6
 /**
  * The least tension of a horizontal stainless wire under NCC 2022.
  *
- * A look-up: the row of this wire and the next greater tabulated spacing, the column of the next greater tabulated
+ * Formula: a look-up: the row of this wire and the next greater tabulated spacing, the column of the next greater tabulated
  * distance. Never interpolated; what lies outside the table is not tabulated.
  * Units: nm in, N out; spacing centre to centre, distance clear between posts (or spacers).
  * Source: ABCB Housing Provisions 2022, table 11.3.6a.
@@ -45,6 +45,7 @@ export const leastWireTension = (wire: Wire, spacing: number, distance: number):
 /**
  * The largest deflection of a continuous wire with 2 kg hung at mid-span under NCC 2022: how its tension is proved.
  *
+ * Formula: a look-up, as for the least tension; the lay does not matter.
  * Units: nm in, mm out.
  * Source: ABCB Housing Provisions 2022, table 11.3.6b.
  *
