@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { describeIssues } from './describe-issue'
 import { makeGuardRulesSchema } from './guard-rules'
 import { makeHardwareSchema } from './hardware'
 import { makeHouseRulesSchema } from './house-rules'
@@ -45,11 +46,9 @@ export class SurveyFileError extends Error {
 /** Reads a parsed survey file in its own units. @throws SurveyFileError naming path, value and expectation of every fault. */
 export function readSurveyFile(input: unknown): SurveyFile {
   const units = unitsOnly.safeParse(input)
-  if (!units.success)
-    throw new SurveyFileError(units.error.issues.map((issue) => describeIssue(issue, input)))
+  if (!units.success) throw new SurveyFileError(describeIssues(units.error.issues, input))
   const parsed = makeSurveyFileSchema(quantitiesIn(units.data.survey.units)).safeParse(input)
-  if (!parsed.success)
-    throw new SurveyFileError(parsed.error.issues.flatMap((issue) => describeIssue(issue, input)))
+  if (!parsed.success) throw new SurveyFileError(describeIssues(parsed.error.issues, input))
   return parsed.data
 }
 
@@ -63,34 +62,3 @@ export const surveyFileJsonSchema = (units: Units): unknown =>
 
 /** The same document in the program's own units, for what is stored and sent. */
 export const storedSurveyFileSchema = makeSurveyFileSchema(storedQuantities)
-
-/** One fault as a sentence: the path, the value found there and what was expected. */
-export function describeIssue(issue: z.core.$ZodIssue, input: unknown): string {
-  const path = issue.path.length > 0 ? formatPath(issue.path) : 'the file'
-  if (issue.code === 'unrecognized_keys') {
-    return issue.keys
-      .map((key) => `${formatPath([...issue.path, key])}: unknown key; remove it or correct its name`)
-      .join('\n')
-  }
-  return `${path}: found ${showValue(valueAt(input, issue.path))}, ${issue.message.replace(/^(Invalid [a-z]+|Too small|Too big): /, '')}`
-}
-
-const formatPath = (path: PropertyKey[]): string =>
-  path
-    .map((part, i) => (typeof part === 'number' ? `[${part}]` : `${i > 0 ? '.' : ''}${String(part)}`))
-    .join('')
-
-function valueAt(input: unknown, path: PropertyKey[]): unknown {
-  let value = input
-  for (const part of path) {
-    if (typeof value !== 'object' || value === null) return undefined
-    value = (value as Record<PropertyKey, unknown>)[part]
-  }
-  return value
-}
-
-function showValue(value: unknown): string {
-  if (value === undefined) return 'nothing'
-  const text = JSON.stringify(value)
-  return text.length > 60 ? `${text.slice(0, 57)}…` : text
-}

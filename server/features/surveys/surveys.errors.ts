@@ -78,15 +78,13 @@ export const surveyFileFaults = (faults: readonly string[]) =>
     422,
     'survey-file-invalid',
     faults.length === 1
-      ? `The survey file has a fault and nothing was imported. ${faults[0]}`
+      ? `The survey file has a fault and nothing was imported. ${faults[0]}.`
       : `The survey file has ${faults.length} faults and nothing was imported. Correct them and import it again.`,
     {
-      fields: faults
-        .flatMap((fault) => fault.split('\n'))
-        .map((fault) => {
-          const end = fault.indexOf(': ')
-          return { path: fault.slice(0, Math.max(end, 0)), message: fault.slice(end < 0 ? 0 : end + 2) }
-        }),
+      fields: faults.map((fault) => {
+        const end = fault.indexOf(': ')
+        return { path: fault.slice(0, Math.max(end, 0)), message: fault.slice(end < 0 ? 0 : end + 2) }
+      }),
     },
   )
 

@@ -95,7 +95,7 @@ describe('unknown keys', () => {
 
   it('are named all at once', () => {
     const twice = sampleWith(['survey', 'colour'], 1) as { rules: object }
-    expect(faultsOf({ ...twice, rules: { ...twice.rules, kerf: 1, saw: 2 } })).toHaveLength(2)
+    expect(faultsOf({ ...twice, rules: { ...twice.rules, kerf: 1, saw: 2 } })).toHaveLength(3)
     expect(faultsOf({ ...twice, rules: { ...twice.rules, kerf: 1, saw: 2 } }).join('\n')).toMatch(
       /survey\.colour[^]*rules\.kerf[^]*rules\.saw/,
     )
@@ -104,63 +104,79 @@ describe('unknown keys', () => {
 
 describe('every fault names path, value and what was expected', () => {
   it.each<[(string | number)[], Json | undefined, string]>([
-    [['survey', 'title'], 7, 'survey.title: found 7, expected string'],
-    [['survey', 'title'], undefined, 'survey.title: found nothing, expected string'],
+    [['survey', 'title'], 7, 'survey.title: found 7, expected text'],
+    [['survey', 'title'], undefined, 'survey.title: found nothing, expected text'],
     [['survey', 'version'], 2, 'survey.version: found 2, expected 1'],
     [['survey', 'format'], 'other', 'survey.format: found "other", expected "tautbook.survey"'],
-    [['survey', 'units', 'length'], 'cm', 'survey.units.length: found "cm", expected one of "in"|"mm"'],
-    [['survey', 'posts'], 'P1', 'survey.posts: found "P1", expected array'],
-    [['survey', 'posts', 0, 'cover'], -1, 'survey.posts[0].cover: found -1, expected number to be >=0'],
-    [['survey', 'posts', 0, 'along'], 0, 'survey.posts[0].along: found 0, expected number to be >0'],
+    [['survey', 'units', 'length'], 'cm', 'survey.units.length: found "cm", expected one of "in", "mm"'],
+    [['survey', 'posts'], 'P1', 'survey.posts: found "P1", expected a list in [ ]'],
+    [['survey', 'posts', 0, 'cover'], -1, 'survey.posts[0].cover: found -1, expected a number at least 0'],
+    [['survey', 'posts', 0, 'along'], 0, 'survey.posts[0].along: found 0, expected a number above 0'],
     [
       ['survey', 'posts', 0, 'along'],
       1e-9,
       'survey.posts[0].along: found 1e-9, expected a length above zero',
     ],
-    [['survey', 'posts', 0, 'along'], '3.5', 'survey.posts[0].along: found "3.5", expected number'],
-    [['survey', 'posts', 0, 'material'], 'pine', 'survey.posts[0].material: found "pine", expected one of'],
-    [['survey', 'posts', 0, 'id'], 'P 1', 'survey.posts[0].id: found "P 1", expected 1 to 40 letters'],
+    [['survey', 'posts', 0, 'along'], '3.5', 'survey.posts[0].along: found "3.5", expected a number'],
+    [
+      ['survey', 'posts', 0, 'material'],
+      'pine',
+      'survey.posts[0].material: found "pine", expected one of "softwood", "hardwood", "veneered", "masonry", "metal"',
+    ],
+    [
+      ['survey', 'posts', 0, 'id'],
+      'P 1',
+      'survey.posts[0].id: found "P 1", expected 1 to 40 letters, digits, dots, dashes or underscores, beginning with a letter or digit',
+    ],
     [
       ['survey', 'posts', 1, 'id'],
       'P1',
       'survey.posts[1].id: found "P1", expected an id that is not used twice',
     ],
-    [['survey', 'bays', 0, 'to'], 'P9', 'survey.bays[0].to: found "P9", expected the id of a post'],
-    [['survey', 'bays', 0, 'to'], 'P1', 'survey.bays[0].to: found "P1", expected another post'],
+    [
+      ['survey', 'bays', 0, 'to'],
+      'P9',
+      'survey.bays[0].to: found "P9", expected the id of a post of this survey',
+    ],
+    [
+      ['survey', 'bays', 0, 'to'],
+      'P1',
+      'survey.bays[0].to: found "P1", expected another post than the bay begins at',
+    ],
     [
       ['survey', 'bays', 0, 'readings', 0, 'on'],
       'May',
       'survey.bays[0].readings[0].on: found "May", expected a date and time such as 2026-05-04T10:12:00Z',
     ],
-    [['survey', 'runs', 0, 'bays'], [], 'survey.runs[0].bays: found [], expected array to have >=1 items'],
-    [['survey', 'runs', 0, 'bays', 0], 'B9', 'survey.runs[0].bays[0]: found "B9", expected the id of a bay'],
+    [['survey', 'runs', 0, 'bays'], [], 'survey.runs[0].bays: found [], expected a list of at least 1 entry'],
+    [
+      ['survey', 'runs', 0, 'bays', 0],
+      'B9',
+      'survey.runs[0].bays[0]: found "B9", expected the id of a bay of this survey',
+    ],
     [
       ['survey', 'runs', 0, 'cable'],
       'rope',
-      'survey.runs[0].cable: found "rope", expected the id of a cable',
+      'survey.runs[0].cable: found "rope", expected the id of a cable of the hardware',
     ],
     [
       ['survey', 'corners', 0, 'angle'],
       200,
-      'survey.corners[0].angle: found 200, expected number to be <=180',
+      'survey.corners[0].angle: found 200, expected a number at most 180',
     ],
     [
       ['survey', 'photos', 0, 'posts', 'P9'],
       { base: [0, 0] },
-      'survey.photos[0].posts.P9: found {"base":[0,0]}, expected the id of a post',
+      'survey.photos[0].posts.P9: found {"base":[0,0]}, expected the id of a post of this survey',
     ],
-    [['rules', 'reserve'], 2, 'rules.reserve: found 2, expected number to be <=0.9'],
+    [['rules', 'reserve'], 2, 'rules.reserve: found 2, expected a number at most 0.9'],
     [
       ['hardware', 'fittings', 0, 'takeUp'],
       undefined,
-      'hardware.fittings[0].takeUp: found nothing, expected number',
+      'hardware.fittings[0].takeUp: found nothing, expected a number',
     ],
   ])('%j = %j', (path, value, fault) => {
-    const faults = faultsOf(sampleWith(path, value))
-    expect(
-      faults.some((found) => found.startsWith(fault)),
-      faults.join('\n'),
-    ).toBe(true)
+    expect(faultsOf(sampleWith(path, value))).toContain(fault)
   })
 
   it.each([[null], [[]], ['survey'], [{}], [{ survey: null }]])('of %j too', (input) => {

@@ -80,7 +80,7 @@ describe('importing a survey file', () => {
     expect([status, code]).toEqual([422, 'survey-file-invalid'])
     expect(message).toMatch(/4 faults and nothing was imported/)
     expect(fields).toEqual([
-      { path: 'survey.posts[1].along', message: expect.stringMatching(/^found -3, .*>0/i) as string },
+      { path: 'survey.posts[1].along', message: 'found -3, expected a number above 0' },
       { path: 'survey.posts[2].colour', message: expect.stringMatching(/unknown key/) as string },
       { path: 'survey.bays[0].to', message: 'found "P9", expected the id of a post of this survey' },
       {
@@ -102,6 +102,14 @@ describe('importing a survey file', () => {
       expect(await refusal(input)).toMatchObject({ status: 422, code: 'survey-file-invalid' })
     },
   )
+
+  it('says a single fault once, as a sentence', async () => {
+    const input = file(true)
+    input.survey['title'] = 3
+    expect((await refusal(input)).message).toBe(
+      'The survey file has a fault and nothing was imported. survey.title: found 3, expected text.',
+    )
+  })
 
   it('names the run and the cable that the company lacks', async () => {
     const input = file(true)
