@@ -7,7 +7,7 @@ type PersonRow = typeof people.$inferSelect
 type CompanyRow = typeof companies.$inferSelect
 
 /** A company as everybody in it sees it. */
-export const presentCompany = (row: CompanyRow): Company => ({
+export const presentCompany = (row: Omit<CompanyRow, 'lastJobNumber' | 'createdAt'>): Company => ({
   id: row.id,
   name: row.name,
   units: { length: row.lengthUnit, force: row.forceUnit },
@@ -28,7 +28,7 @@ export const presentPerson = (row: PersonRow): Person => ({
 /** The person of a request. */
 export const toSignedIn = (
   person: Pick<PersonRow, 'id' | 'companyId' | 'name' | 'email' | 'roles' | 'lastSignInAt'>,
-  company: CompanyRow,
+  company: Omit<CompanyRow, 'lastJobNumber' | 'createdAt'>,
 ): SignedIn => ({
   id: person.id,
   companyId: person.companyId,

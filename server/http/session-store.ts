@@ -1,8 +1,7 @@
 import { createHash } from 'node:crypto'
 import type { Request } from 'express'
 import { type Session, type SessionData, Store } from 'express-session'
-import type { Database } from '../database/client'
-import { toSignedIn } from './account'
+import type { Database, OpenDatabase } from '../database/client'
 import {
   deleteExpiredSessions,
   deleteSession,
@@ -21,23 +20,25 @@ export const hashSessionId = (id: string): string => createHash('sha256').update
 
 type Done = (error?: unknown) => void
 /** What `get` hands to `createSession` beside the data, out of the way of whoever writes or compares these. */
-type FoundSession = SessionData & { account?: SignedIn }
+type HandedOver = SessionData & { account?: SignedIn }
 
 /**
  * Sessions in PostgreSQL. One query reads the session, its person and their company, so a request costs one look-up
  * and a person who was disabled or changed is seen as they are now.
  */
 export class SessionStore extends Store {
+  private readonly database: Database
   private readonly find: ReturnType<typeof sessionFinder>
   /** When sessions that have ended were last cleared away. */
   private sweptAt = 0
 
   constructor(
-    private readonly database: Database,
+    open: OpenDatabase,
     private readonly clock: () => Date,
   ) {
     super()
-    this.find = sessionFinder(database)
+    this.database = open.database
+    this.find = sessionFinder(open)
   }
 
   override get(id: string, done: (error: unknown, session?: SessionData | null) => void): void {
@@ -58,7 +59,7 @@ export class SessionStore extends Store {
   }
 
   /** Makes the session of a request, and its person. */
-  override createSession(request: Request, found: FoundSession): Session & SessionData {
+  override createSession(request: Request, found: HandedOver): Session & SessionData {
     const session = super.createSession(request, found)
     hide(session, 'known', true)
     request.user = found.account
@@ -73,9 +74,9 @@ export class SessionStore extends Store {
     const row = await this.find(hashSessionId(id), this.clock())
     if (!row) return null
     // A session that was somebody's and is nobody's now belongs to a disabled person.
-    if (row.personId !== null && !row.person) return null
+    if (row.personId !== null && !row.account) return null
     const found = row.data as SessionData
-    if (row.person && row.company) hide(found, 'account', toSignedIn(row.person, row.company))
+    if (row.account) hide(found, 'account', row.account)
     return found
   }
 

@@ -9,6 +9,8 @@ export const paths = {
   survey: (surveyId: string) => `/surveys/${surveyId}`,
   surveyTable: (surveyId: string) => `/surveys/${surveyId}/table`,
   surveyHistory: (surveyId: string) => `/surveys/${surveyId}/history`,
+  findings: (surveyId: string) => `/surveys/${surveyId}/findings`,
+  checks: (surveyId: string) => `/surveys/${surveyId}/checks`,
   cutList: (surveyId: string) => `/surveys/${surveyId}/cut-list`,
   working: (surveyId: string, run: string, cable: number) =>
     `/surveys/${surveyId}/cut-list/${encodeURIComponent(run)}/${cable}`,
@@ -18,6 +20,9 @@ export const paths = {
   newCable: '/hardware/cables/new',
   cable: (key: string) => `/hardware/cables/${key}`,
   houseRules: '/house-rules',
+  guardRules: '/guard-rules',
+  newGuardRules: (from: string) => `/guard-rules/new?from=${encodeURIComponent(from)}`,
+  guardRulesOf: (id: string) => `/guard-rules/${encodeURIComponent(id)}`,
   people: '/people',
   company: '/company',
   account: '/account',

@@ -30,6 +30,8 @@ export const router = createBrowserRouter([
               },
               { path: paths.surveyTable(':surveyId'), lazy: () => import('./routes/survey-table') },
               { path: paths.surveyHistory(':surveyId'), lazy: () => import('./routes/survey-history') },
+              { path: paths.findings(':surveyId'), lazy: () => import('./routes/findings') },
+              { path: paths.checks(':surveyId'), lazy: () => import('./routes/checks') },
               { path: paths.cutList(':surveyId'), lazy: () => import('./routes/cut-list') },
               { path: '/surveys/:surveyId/cut-list/:run/:cable', lazy: () => import('./routes/working') },
               { path: paths.hardware, lazy: () => import('./routes/hardware') },

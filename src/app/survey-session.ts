@@ -1,10 +1,13 @@
 import { useQuery } from '@tanstack/react-query'
 import { useBlocker } from 'react-router-dom'
 import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
+import { surveyFindings } from '@shared/calculation/survey-findings'
+import type { GuardRules } from '@shared/schemas/guard-rules'
 import type { Hardware } from '@shared/schemas/hardware'
 import type { HouseRules } from '@shared/schemas/house-rules'
 import type { PhotoRecord, SurveyRecord } from '@shared/schemas/survey-record'
 import { askBefore, sayProblem } from '@/components/toast'
+import { guardRulesQuery } from '@/features/guard-rules/api/list-guard-rules'
 import { hardwareQuery } from '@/features/hardware/api/read-hardware'
 import { houseRulesQuery } from '@/features/hardware/api/read-house-rules'
 import { usableHardware } from '@/features/hardware/usable-hardware'
@@ -37,6 +40,8 @@ export interface Loaded {
   record: SurveyRecord
   hardware: Hardware
   rules: HouseRules
+  /** The company’s own, retired ones too: a survey may name them still. */
+  guardRules: GuardRules[]
 }
 
 /** What a survey's screens need before they can begin; `stale` says why what is shown could not be read again. */
@@ -44,17 +49,21 @@ export function useSurveyData(surveyId: string) {
   const record = useQuery(surveyQuery(surveyId))
   const catalogue = useQuery(hardwareQuery)
   const rules = useQuery(houseRulesQuery)
-  const error = record.error ?? catalogue.error ?? rules.error
+  const own = useQuery(guardRulesQuery)
+  const error = record.error ?? catalogue.error ?? rules.error ?? own.error
   const survey = record.data?.survey
   const hardware = useMemo(
     () => (catalogue.data && survey ? usableHardware(catalogue.data, survey) : undefined),
     [catalogue.data, survey],
   )
   const retry = () => {
-    for (const query of [record, catalogue, rules]) if (query.error) void query.refetch()
+    for (const query of [record, catalogue, rules, own]) if (query.error) void query.refetch()
   }
+  const guardRules = useMemo(() => own.data?.map((entry) => entry.rules), [own.data])
   const data: Loaded | undefined =
-    record.data && hardware && rules.data ? { record: record.data, hardware, rules: rules.data } : undefined
+    record.data && hardware && rules.data && guardRules
+      ? { record: record.data, hardware, rules: rules.data, guardRules }
+      : undefined
   return { data, error: data ? null : error, stale: data ? error : null, readAt: record.dataUpdatedAt, retry }
 }
 
@@ -69,18 +78,30 @@ export function useSurveySession(loaded: Loaded): SurveySession {
   useSendOnReturn(queue)
   useWarnBeforeLeaving(queueState)
   const { survey, selection } = state
+  const findings = useMemo(
+    () =>
+      surveyFindings({
+        survey,
+        hardware: loaded.hardware,
+        rules: loaded.rules,
+        guardRules: loaded.guardRules,
+      }),
+    [survey, loaded],
+  )
   const view = useMemo<EditorView>(
     () => ({
       survey,
       selection,
       hardware: loaded.hardware,
       rules: loaded.rules,
+      guardRules: loaded.guardRules,
+      findings,
       units: survey.units,
       fraction: company.fraction,
       person: { name: person.name },
       canEdit,
     }),
-    [survey, selection, loaded, company.fraction, person.name, canEdit],
+    [survey, selection, findings, loaded, company.fraction, person.name, canEdit],
   )
   const addPhotoRecord = (photo: PhotoRecord) => {
     setPhotos((known) => {

@@ -9,3 +9,15 @@ export function CutCautions() {
     </p>
   )
 }
+
+/** The cautions of whoever judges a guard. */
+export function GuardCautions() {
+  return (
+    <p className="rounded border border-rule bg-card p-3 text-sm text-soft">
+      Guards are life-safety parts. These checks are arithmetic on what was entered: local code, the authority
+      having jurisdiction and a licensed engineer decide. Never tension past the limit of fitting, cable or
+      post. Masonry anchors follow the anchor maker’s instructions; treated wood and stainless only, no plain
+      or galvanised steel against it. Find wiring and plumbing before drilling into a wall.
+    </p>
+  )
+}

@@ -33,14 +33,28 @@ export function FindingMark({ level, className }: { level: FindingLevel; classNa
 export function FindingItem({
   finding,
   action,
+  muted = false,
+  children,
 }: {
-  finding: Pick<Finding, 'level' | 'text'>
+  finding: Pick<Finding, 'level' | 'text' | 'rule'>
   action?: ReactNode
+  /** It was let pass. */
+  muted?: boolean
+  children?: ReactNode
 }) {
   return (
-    <div className={classes('flex items-start gap-3 rounded border p-3', grounds[finding.level])}>
+    <div
+      className={classes(
+        'flex items-start gap-3 rounded border p-3',
+        muted ? 'border-rule bg-card' : grounds[finding.level],
+      )}
+    >
       <FindingMark level={finding.level} className="mt-0.5" />
-      <p className="min-w-0 flex-1 text-base">{finding.text}</p>
+      <div className="min-w-0 flex-1">
+        <p className="text-base">{finding.text}</p>
+        {finding.rule ? <p className="mt-1 text-sm text-soft">{finding.rule}</p> : null}
+        {children}
+      </div>
       {action}
     </div>
   )

@@ -1,20 +1,27 @@
 import { type ReactNode, useMemo } from 'react'
 import { Link, useParams } from 'react-router-dom'
 import { surveys as endpoints } from '@shared/endpoints/surveys'
+import { allFindings } from '@shared/calculation/all-findings'
 import { calculateSurvey } from '@shared/calculation/calculate-survey'
+import { checkSurvey } from '@shared/calculation/checks/check-survey'
 import { cutListRows } from '@shared/cut-list/cut-list-rows'
 import { fittingsToPick } from '@shared/cut-list/fittings-to-pick'
 import type { Finding } from '@shared/schemas/finding'
+import { overrulingOf } from '@shared/survey/overrule'
 import { buttonClasses, ButtonLink } from '@/components/button'
 import { CutCautions } from '@/components/cautions'
 import { Page } from '@/components/page'
 import { EmptyState, ErrorNote, Loading } from '@/components/states'
 import { Findings, RunSection, Totals } from '@/features/cut-list/cut-list'
+import { JudgedFinding } from '@/features/findings/judged-finding'
 import { PickList } from '@/features/cut-list/pick-list'
 import { useSession } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
 import { momentText } from '@/lib/date-text'
 import { StaleNote } from '../stale-note'
+import { inputOf } from '../calculation-input'
+import { FollowedRules } from '../followed-rules'
+import { GoThere } from '../go-there'
 import { lengthFormat } from '../length-format'
 import { paths } from '../paths'
 import { type Loaded, useSurveyData } from '../survey-session'
@@ -39,23 +46,26 @@ export function Component() {
   )
 }
 
-function CutList({ loaded: { record, hardware, rules }, note }: { loaded: Loaded; note: ReactNode }) {
+function CutList({ loaded, note }: { loaded: Loaded; note: ReactNode }) {
   const { company } = useSession()
+  const { record } = loaded
   const { survey } = record
-  const input = useMemo(() => ({ survey, hardware, rules }), [survey, hardware, rules])
+  const input = useMemo(() => inputOf(loaded), [loaded])
   const result = useMemo(() => calculateSurvey(input), [input])
-  const list = useMemo(() => cutListRows(result, input), [result, input])
+  const list = useMemo(
+    () => cutListRows({ ...result, findings: allFindings(result, checkSurvey(input)) }, input),
+    [result, input],
+  )
   const picks = useMemo(() => fittingsToPick(result, input), [result, input])
   const format = lengthFormat(survey.units, company.fraction)
   const file = (path: string) => path.replace(':surveyId', record.id)
-  const goThere = ({ where: { bay, post, run } }: Finding) => {
-    const place = bay ? `bay=${bay}` : post ? `post=${post}` : run ? `run=${run}` : ''
-    return place === '' ? null : (
-      <ButtonLink look="quiet" to={`${paths.survey(record.id)}?${place}`}>
-        Go there
-      </ButtonLink>
-    )
-  }
+  const show = (finding: Finding) => (
+    <JudgedFinding
+      finding={finding}
+      overruling={overrulingOf(survey, finding)}
+      goThere={<GoThere surveyId={record.id} finding={finding} />}
+    />
+  )
   return (
     <Page
       title={`Cut list: ${survey.title}`}
@@ -67,6 +77,8 @@ function CutList({ loaded: { record, hardware, rules }, note }: { loaded: Loaded
       actions={
         <>
           <ButtonLink to={paths.survey(record.id)}>Survey</ButtonLink>
+          <ButtonLink to={paths.findings(record.id)}>Findings</ButtonLink>
+          <ButtonLink to={paths.checks(record.id)}>Checks</ButtonLink>
           <a className={buttonClasses('primary')} href={file(endpoints.exportWorkbook.path)} download>
             XLSX
           </a>
@@ -96,17 +108,18 @@ function CutList({ loaded: { record, hardware, rules }, note }: { loaded: Loaded
           <p className="text-lg">
             <Totals totals={list.totals} format={format} />
           </p>
-          <Findings findings={list.findings} goThere={goThere} />
+          <Findings findings={list.findings} show={show} />
           {list.groups.map((group) => (
             <RunSection
               key={group.run.run}
               group={group}
               format={format}
               workingOf={(run, cable) => paths.working(record.id, run, cable)}
-              goThere={goThere}
+              show={show}
             />
           ))}
           <PickList {...picks} format={format} />
+          <FollowedRules loaded={loaded} />
           <CutCautions />
         </div>
       )}

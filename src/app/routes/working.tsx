@@ -8,6 +8,7 @@ import { EmptyState, ErrorNote, Loading } from '@/components/states'
 import { Working } from '@/features/cut-list/working'
 import { useSession } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
+import { inputOf } from '../calculation-input'
 import { lengthFormat } from '../length-format'
 import { paths } from '../paths'
 import { useSurveyData } from '../survey-session'
@@ -26,10 +27,7 @@ export function Component() {
   }
   if (!data) return <Loading what="the working" />
   const { survey } = data.record
-  const working = explainCable(
-    { survey, hardware: data.hardware, rules: data.rules },
-    { run, cable: Number(cable) },
-  )
+  const working = explainCable(inputOf(data), { run, cable: Number(cable) })
   return (
     <Page
       title={`Cable ${run}-${cable}`}

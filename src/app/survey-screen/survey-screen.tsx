@@ -1,5 +1,6 @@
-import { lazy, Suspense, useEffect, useState, useSyncExternalStore } from 'react'
+import { lazy, Suspense, useEffect, useEffectEvent, useState, useSyncExternalStore } from 'react'
 import { useSearchParams } from 'react-router-dom'
+import type { Finding } from '@shared/schemas/finding'
 import { Sheet } from '@/components/sheet'
 import { Loading } from '@/components/states'
 import { sayDone, sayProblem } from '@/components/toast'
@@ -35,7 +36,7 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
   const toCutList = () => go(paths.cutList(record.id))
   useKeys(editor)
   useWakeLock()
-  useOpenAt(session)
+  useOpenAt(session, () => setSheet('settings'))
   useQuestionMark(() => setSheet('keys'))
   useEffect(() => {
     document.title = `${view.survey.title} · Tautbook`
@@ -52,6 +53,8 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
         onTable={() => go(paths.surveyTable(record.id))}
         onHistory={() => go(paths.surveyHistory(record.id))}
         onCutList={toCutList}
+        onFindings={() => go(paths.findings(record.id))}
+        found={foundText(view.findings)}
         onSettings={() => setSheet('settings')}
         onKeys={() => setSheet('keys')}
         onRemovePhoto={
@@ -85,6 +88,15 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
   )
 }
 
+/** What is to be looked at, in brackets behind a name; nothing where there is nothing. */
+function foundText(findings: readonly Finding[]): string {
+  const parts = (['stop', 'check'] as const).flatMap((level) => {
+    const count = findings.filter((finding) => finding.level === level).length
+    return count === 0 ? [] : [`${count} ${level}${count === 1 ? '' : 's'}`]
+  })
+  return parts.length === 0 ? '' : ` (${parts.join(', ')})`
+}
+
 /** Takes a photo with its marks out of the survey; the posts stay. */
 function removePhoto({ editor, actions }: SurveySession, photoId: string | null): void {
   if (photoId === null) return
@@ -92,8 +104,8 @@ function removePhoto({ editor, actions }: SurveySession, photoId: string | null)
   sayDone(`Photo ${photoId} removed, with its marks; the posts stay.`, actions.undo)
 }
 
-/** An address with `?bay=B2` opens the survey with that in hand: where a finding leads. */
-function useOpenAt({ actions }: SurveySession): void {
+/** An address with `?bay=B2` opens the survey with that in hand, one with `?guard` its guard: where a finding leads. */
+function useOpenAt({ actions }: SurveySession, openGuard: () => void): void {
   const [search] = useSearchParams()
   const { select } = actions
   useEffect(() => {
@@ -102,6 +114,10 @@ function useOpenAt({ actions }: SurveySession): void {
       if (id) select({ kind, id })
     }
   }, [search, select])
+  const openNow = useEffectEvent(openGuard)
+  useEffect(() => {
+    if (search.has('guard')) openNow()
+  }, [search])
 }
 
 function useQuestionMark(show: () => void): void {

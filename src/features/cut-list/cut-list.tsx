@@ -2,21 +2,22 @@ import type { ReactNode } from 'react'
 import type { CutListGroup, CutListTotals } from '@shared/cut-list/cut-list-rows'
 import type { Finding } from '@shared/schemas/finding'
 import type { LengthFormat } from '@shared/units/format-length'
-import { FindingItem } from '@/components/finding-mark'
 import { Length } from '@/components/length'
 import { RunTable } from './run-table'
 import { modeWords } from './words'
+
+/** Draws a finding. */
+export type ShowFinding = (finding: Finding) => ReactNode
 
 interface RunSectionProps {
   group: CutListGroup
   format: LengthFormat
   workingOf: (run: string, cable: number) => string
-  /** A way to where a finding is. */
-  goThere: (finding: Finding) => ReactNode
+  show: ShowFinding
 }
 
 /** One run: what it is, its findings, its cables. */
-export function RunSection({ group, format, workingOf, goThere }: RunSectionProps) {
+export function RunSection({ group, format, workingOf, show }: RunSectionProps) {
   const { run, findings } = group
   return (
     <section aria-label={`Run ${run.run}`} className="flex flex-col gap-3">
@@ -28,7 +29,7 @@ export function RunSection({ group, format, workingOf, goThere }: RunSectionProp
           {group.rows[0]?.cableName}, <Totals totals={group.totals} format={format} />
         </p>
       </div>
-      <Findings findings={findings} goThere={goThere} />
+      <Findings findings={findings} show={show} />
       {(['shop', 'site', 'none'] as const).map((mode) =>
         group.totals[mode] > 0 ? (
           <p key={mode} className="text-sm text-soft">
@@ -45,28 +46,32 @@ export function RunSection({ group, format, workingOf, goThere }: RunSectionProp
   )
 }
 
-/** The gravest first. */
-const order: Record<Finding['level'], number> = { stop: 0, check: 1, note: 2 }
-
-export function Findings({
-  findings,
-  goThere,
-}: {
-  findings: readonly Finding[]
-  goThere: (finding: Finding) => ReactNode
-}) {
-  if (findings.length === 0) return null
-  const sorted = findings.toSorted((a, b) => order[a.level] - order[b.level])
+/** What was noticed: what is to be looked at, and below it, folded away, what is good to know. */
+export function Findings({ findings, show }: { findings: readonly Finding[]; show: ShowFinding }) {
+  const notes = findings.filter(({ level }) => level === 'note')
+  const grave = findings.filter(({ level }) => level !== 'note')
   return (
-    <ul aria-label="Findings" className="flex flex-col gap-2">
-      {sorted.map((finding) => (
-        <li key={`${finding.code} ${finding.text}`}>
-          <FindingItem finding={finding} action={goThere(finding)} />
-        </li>
-      ))}
-    </ul>
+    <>
+      {grave.length > 0 ? <FindingList findings={grave} show={show} /> : null}
+      {notes.length > 0 ? (
+        <details>
+          <summary className="min-h-12 py-3 text-soft">
+            {notes.length === 1 ? '1 note' : `${notes.length} notes`}
+          </summary>
+          <FindingList findings={notes} show={show} />
+        </details>
+      ) : null}
+    </>
   )
 }
+
+const FindingList = ({ findings, show }: { findings: readonly Finding[]; show: ShowFinding }) => (
+  <ul aria-label="Findings" className="flex flex-col gap-2">
+    {findings.map((finding) => (
+      <li key={`${finding.code} ${finding.text}`}>{show(finding)}</li>
+    ))}
+  </ul>
+)
 
 export function Totals({ totals, format }: { totals: CutListTotals; format: LengthFormat }) {
   const parts = [

@@ -5,6 +5,7 @@ import {
   EllipsisVertical,
   ImageOff,
   History,
+  OctagonAlert,
   Redo2,
   Settings2,
   Table2,
@@ -24,6 +25,9 @@ interface EditorBarProps {
   onTable: () => void
   onHistory: () => void
   onCutList: () => void
+  onFindings: () => void
+  /** How many stops and checks there are, in words. */
+  found: string
   onSettings: () => void
   onKeys: () => void
   /** None where there is no photo, or for somebody who may only look. */
@@ -40,6 +44,8 @@ export function EditorBar({
   onTable,
   onHistory,
   onCutList,
+  onFindings,
+  found,
   onSettings,
   onKeys,
   onRemovePhoto,
@@ -68,6 +74,9 @@ export function EditorBar({
       >
         <MenuItem onSelect={onCutList}>
           <ClipboardList aria-hidden="true" className="size-5" /> Cut list
+        </MenuItem>
+        <MenuItem onSelect={onFindings}>
+          <OctagonAlert aria-hidden="true" className="size-5" /> Findings{found}
         </MenuItem>
         <MenuItem onSelect={onTable}>
           <Table2 aria-hidden="true" className="size-5" /> The survey as a table

@@ -34,8 +34,8 @@ export function captionsOf(survey: Survey, findings: readonly Finding[], format:
   const ofBays = new Map<string, FindingLevel>()
   const posts = new Map<string, FindingLevel>()
   for (const { level, where, code } of findings) {
-    // What is only missing yet shows as a dashed line or in *next missing*; a shape is for what is wrong.
-    if (missing.has(code)) continue
+    // What is only missing yet shows as a dashed line or in *next missing*; a shape is for what is to be looked at.
+    if (missing.has(code) || level === 'note') continue
     if (where.bay) ofBays.set(where.bay, graver(ofBays.get(where.bay), level))
     else if (where.post) posts.set(where.post, graver(posts.get(where.post), level))
   }

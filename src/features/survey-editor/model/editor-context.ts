@@ -1,3 +1,5 @@
+import type { Finding } from '@shared/schemas/finding'
+import type { GuardRules } from '@shared/schemas/guard-rules'
 import type { Hardware } from '@shared/schemas/hardware'
 import type { HouseRules } from '@shared/schemas/house-rules'
 import type { Units } from '@shared/schemas/quantities'
@@ -15,6 +17,10 @@ export interface EditorView {
   /** What may be chosen from: the company's hardware, retired entries left out. */
   hardware: Hardware
   rules: HouseRules
+  /** The company’s own guard rules, retired ones too. */
+  guardRules: GuardRules[]
+  /** Everything noticed about the survey as it stands, the gravest first. */
+  findings: readonly Finding[]
   units: Units
   /** Fractions of an inch on the keypad and in lengths. */
   fraction: 16 | 32 | 64

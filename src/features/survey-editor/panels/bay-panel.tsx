@@ -4,6 +4,7 @@ import { Button } from '@/components/button'
 import { ChoiceGroup } from '@/components/choices'
 import { sayDone } from '@/components/toast'
 import { NumberBox } from './number-box'
+import { PanelFindings } from './panel-findings'
 import type { PanelProps } from './selection-panel'
 import { Readings } from './readings'
 import { StairFields } from './stair-fields'
@@ -74,6 +75,7 @@ export function BayPanel({ view, actions, bay, onNext }: PanelProps & { bay: Bay
           onChange={(skewTo) => set({ skewTo })}
         />
       </div>
+      <PanelFindings view={view} of={{ kind: 'bay', id: bay.id }} />
       {canEdit && (
         <Button look="danger" onClick={remove}>
           Remove bay

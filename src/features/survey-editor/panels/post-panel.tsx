@@ -9,6 +9,7 @@ import { CornerField } from './corner-field'
 import { formatOf } from './format-of'
 import { dressedSizes } from './lumber'
 import { MeasureField } from './measure-field'
+import { PanelFindings } from './panel-findings'
 import type { PanelProps } from './selection-panel'
 
 type Fields = Omit<Post, 'id'>
@@ -125,6 +126,7 @@ export function PostPanel({ view, actions, post }: PanelProps & { post: Post }) 
           if (note !== post.note) set({ note })
         }}
       />
+      <PanelFindings view={view} of={{ kind: 'post', id: post.id }} />
       {canEdit && (
         <Button look="danger" onClick={remove}>
           Remove post

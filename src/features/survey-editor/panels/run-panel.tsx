@@ -10,6 +10,7 @@ import { formatOf } from './format-of'
 import { HeightsField } from './heights-field'
 import { Readings } from './readings'
 import { MeasureField } from './measure-field'
+import { PanelFindings } from './panel-findings'
 import type { PanelProps } from './selection-panel'
 
 const layouts = [
@@ -75,6 +76,7 @@ export function RunPanel({ view, actions, run }: PanelProps & { run: Run }) {
         </p>
         <Readings view={view} actions={actions} of={{ kind: 'run', id: run.id }} readings={run.readings} />
       </details>
+      <PanelFindings view={view} of={{ kind: 'run', id: run.id }} />
       {canEdit && <RunChanges view={view} actions={actions} run={run} />}
     </section>
   )

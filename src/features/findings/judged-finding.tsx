@@ -1,0 +1,78 @@
+import { type ReactNode, useState } from 'react'
+import type { Finding } from '@shared/schemas/finding'
+import type { Overruling } from '@shared/survey/overrule'
+import { Button } from '@/components/button'
+import { FindingItem } from '@/components/finding-mark'
+import { momentText } from '@/lib/date-text'
+import { OverruleForm } from './overrule-form'
+
+export interface Overruler {
+  /** Lets a stop pass, with its reason; resolves once it is kept. */
+  overrule: (finding: Finding, reason: string) => Promise<void>
+  /** Makes it stand again. */
+  uphold: (finding: Finding) => Promise<void>
+}
+
+interface JudgedFindingProps {
+  finding: Finding
+  overruling?: Overruling | undefined
+  /** Only for those who may. */
+  overruler?: Overruler | undefined
+  /** A way to where it is. */
+  goThere: ReactNode
+}
+
+/** A finding, the rule behind it, a way there, and for a *stop* how it was let pass or a way to do that. */
+export function JudgedFinding({ finding, overruling, overruler, goThere }: JudgedFindingProps) {
+  const [asking, setAsking] = useState(false)
+  const stands = overruling?.stands === true
+  return (
+    <FindingItem finding={finding} muted={stands} action={goThere}>
+      {overruling ? <OverrulingText overruling={overruling} /> : null}
+      {overruler && finding.level === 'stop' ? (
+        asking ? (
+          <OverruleForm
+            onOverrule={async (reason) => {
+              await overruler.overrule(finding, reason)
+              setAsking(false)
+            }}
+            onCancel={() => setAsking(false)}
+          />
+        ) : stands ? (
+          <BusyButton onPress={() => overruler.uphold(finding)}>Make it stand again</BusyButton>
+        ) : (
+          <Button look="quiet" className="-ml-4" onClick={() => setAsking(true)}>
+            Overrule
+          </Button>
+        )
+      ) : null}
+    </FindingItem>
+  )
+}
+
+function BusyButton({ onPress, children }: { onPress: () => Promise<void>; children: ReactNode }) {
+  const [busy, setBusy] = useState(false)
+  return (
+    <Button
+      look="quiet"
+      className="-ml-4"
+      busy={busy}
+      onClick={() => {
+        setBusy(true)
+        void onPress().finally(() => setBusy(false))
+      }}
+    >
+      {children}
+    </Button>
+  )
+}
+
+function OverrulingText({ overruling: { overrule, stands } }: { overruling: Overruling }) {
+  const who = `${overrule.by ?? 'somebody unnamed'}${overrule.on ? `, ${momentText(overrule.on)}` : ''}`
+  return (
+    <p className="mt-2 text-sm">
+      <strong className="font-medium">{stands ? 'Overruled' : 'Was overruled'}</strong> by {who}: “
+      {overrule.reason}”{stands ? null : ' That was with other numbers, and counts no more.'}
+    </p>
+  )
+}

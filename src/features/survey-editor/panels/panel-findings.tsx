@@ -1,0 +1,32 @@
+import type { Finding } from '@shared/schemas/finding'
+import { FindingItem } from '@/components/finding-mark'
+import type { EditorView } from '../model/editor-context'
+
+/** Whether a finding is about what is in hand. */
+export function isAbout(
+  { where }: Finding,
+  { kind, id }: { kind: 'post' | 'bay' | 'run'; id: string },
+): boolean {
+  if (kind === 'run') return where.run === id && where.bay === undefined && where.post === undefined
+  return where[kind] === id
+}
+
+interface PanelFindingsProps {
+  view: EditorView
+  of: { kind: 'post' | 'bay' | 'run'; id: string }
+}
+
+/** What was noticed about what is in hand, the gravest first; nothing where nothing was. */
+export function PanelFindings({ view, of }: PanelFindingsProps) {
+  const findings = view.findings.filter((finding) => isAbout(finding, of))
+  if (findings.length === 0) return null
+  return (
+    <ul aria-label="Findings" className="flex flex-col gap-2">
+      {findings.map((finding) => (
+        <li key={finding.text}>
+          <FindingItem finding={finding} />
+        </li>
+      ))}
+    </ul>
+  )
+}
