@@ -4,10 +4,10 @@ import type { companies, people } from '../database/tables/index'
 import type { SignedIn } from './signed-in'
 
 type PersonRow = typeof people.$inferSelect
-type CompanyRow = typeof companies.$inferSelect
+type CompanyRow = Omit<typeof companies.$inferSelect, 'lastJobNumber' | 'createdAt'>
 
 /** A company as everybody in it sees it. */
-export const presentCompany = (row: Omit<CompanyRow, 'lastJobNumber' | 'createdAt'>): Company => ({
+export const presentCompany = (row: CompanyRow): Company => ({
   id: row.id,
   name: row.name,
   units: { length: row.lengthUnit, force: row.forceUnit },
@@ -28,7 +28,7 @@ export const presentPerson = (row: PersonRow): Person => ({
 /** The person of a request. */
 export const toSignedIn = (
   person: Pick<PersonRow, 'id' | 'companyId' | 'name' | 'email' | 'roles' | 'lastSignInAt'>,
-  company: Omit<CompanyRow, 'lastJobNumber' | 'createdAt'>,
+  company: CompanyRow,
 ): SignedIn => ({
   id: person.id,
   companyId: person.companyId,

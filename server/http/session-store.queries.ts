@@ -27,15 +27,14 @@ type CompanyRow = Pick<
   'lengthUnit' | 'forceUnit' | 'fraction' | 'keepPhotoPlace'
 >
 /** As the driver gives it; where there is no person, all that is theirs is null. */
-type FoundRow = PersonRow &
-  CompanyRow & {
-    data: unknown
-    /** Whose session it was made for. */
-    whose: string | null
-    id: string | null
-    lastSignInAt: string | null
-    companyName: string
-  }
+interface FoundRow extends PersonRow, CompanyRow {
+  data: unknown
+  /** Whose session it was made for. */
+  whose: string | null
+  id: string | null
+  lastSignInAt: string | null
+  companyName: string
+}
 
 /**
  * Finds a session that has not ended, with the person and company it is for; a disabled person's session is nobody's.
