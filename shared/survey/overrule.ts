@@ -30,6 +30,13 @@ export function overrulingOf(survey: Overruled, finding: Finding): Overruling | 
   return overrule && { overrule, stands: overrule.text === finding.text }
 }
 
+/** Stops that say what is missing or cannot be: nobody's judgement gives a cable its length. */
+const noMatterOfJudgement =
+  /^(missing|impossible|broken)-|^(cable-unknown|no-cables|no-fitting|no-room|too-long)$/
+
+/** Whether a stop is a judgement that somebody may take upon themselves. */
+export const mayBeOverruled = ({ code }: Pick<Stop, 'code'>): boolean => !noMatterOfJudgement.test(code)
+
 /** The stops that hold a survey back: those nobody overruled as they are now. */
 export const standingStops = (survey: Overruled, findings: readonly Finding[]): Finding[] =>
   findings.filter((finding) => finding.level === 'stop' && !overrulingOf(survey, finding)?.stands)

@@ -1,8 +1,9 @@
 import { holds } from '@shared/permissions/abilities'
 import type { Role } from '@shared/permissions/roles'
 import type { SimpleOperation, SurveyOperation } from '@shared/survey/survey-operation'
+import { mayBeOverruled } from '@shared/survey/overrule'
 import { stepsOf } from './known-readings'
-import { mayNotOverrule } from './surveys.errors'
+import { cannotBeOverruled, mayNotOverrule } from './surveys.errors'
 
 /** Who sends a change, and when it came in. */
 export interface Sender {
@@ -13,7 +14,7 @@ export interface Sender {
 /**
  * Writes who and when on every overrule of a *stop*; a safety stop is let pass, and made to stand again, only by those
  * who answer for it.
- * @throws AppError `may-not-overrule`
+ * @throws AppError `may-not-overrule`, `cannot-be-overruled`
  */
 export function stampOverrules(operation: SurveyOperation, sender: Sender): SurveyOperation {
   if (!stepsOf(operation).some(isOverruling)) return operation
@@ -25,7 +26,8 @@ export function stampOverrules(operation: SurveyOperation, sender: Sender): Surv
 const isOverruling = ({ type }: SimpleOperation): boolean =>
   type === 'stop.overrule' || type === 'stop.uphold'
 
-const stampStep = (step: SimpleOperation, { person, now }: Sender): SimpleOperation =>
-  step.type === 'stop.overrule'
-    ? { ...step, overrule: { ...step.overrule, by: person.name, on: now.toISOString() } }
-    : step
+function stampStep(step: SimpleOperation, { person, now }: Sender): SimpleOperation {
+  if (step.type !== 'stop.overrule') return step
+  if (!mayBeOverruled(step.overrule)) throw cannotBeOverruled()
+  return { ...step, overrule: { ...step.overrule, by: person.name, on: now.toISOString() } }
+}

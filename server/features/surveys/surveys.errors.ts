@@ -56,6 +56,13 @@ export const mayNotOverrule = () =>
     'Only an owner or estimator can let a stop pass, or make it stand again. Tell one of them what you found.',
   )
 
+export const cannotBeOverruled = () =>
+  new AppError(
+    422,
+    'cannot-be-overruled',
+    'This stop says that something is missing or cannot be cut, which no reason changes. Go to its place and complete it.',
+  )
+
 export const cableNotInCatalogue = (runs: readonly { id: string; cable: string }[]) => {
   const cables = [...new Set(runs.map(({ cable }) => cable))].join(', ')
   const where = runs.map(({ id }) => id).join(', ')

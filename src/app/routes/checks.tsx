@@ -11,7 +11,6 @@ import { EmptyState, ErrorNote, Loading } from '@/components/states'
 import { BaySection } from '@/features/checks/bay-section'
 import { figuresIn } from '@/features/checks/figures'
 import { CornerSection, PostSection } from '@/features/checks/post-section'
-import { useSession } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
 import { inputOf } from '../calculation-input'
 import { FollowedRules } from '../followed-rules'
@@ -94,14 +93,15 @@ function Checks({ loaded, note }: { loaded: Loaded; note: ReactNode }) {
   )
 }
 
+/** Computed openings are shown finer than the house cuts: a sphere knows no sixteenths. */
+const FINEST = 64
 /** Where a post's size was not taken: a nominal 4x4. */
 const USUAL_POST = inches(3.5)
 
 function RunChecks({ run, checks, loaded }: { run: RunCheck; checks: SurveyChecks; loaded: Loaded }) {
-  const { company } = useSession()
   const { record, hardware, rules } = loaded
   const { guard, posts, bays, units } = record.survey
-  const format = lengthFormat(units, company.fraction)
+  const format = lengthFormat(units, FINEST)
   const figures = figuresIn(units)
   const cable = hardware.cables.find(({ id }) => id === run.cable)
   const found = (where: { bay?: string; post?: string }): ReadonlySet<string> =>
@@ -161,8 +161,7 @@ function RunChecks({ run, checks, loaded }: { run: RunCheck; checks: SurveyCheck
 }
 
 function CornerChecks({ checks, loaded }: { checks: SurveyChecks; loaded: Loaded }) {
-  const { company } = useSession()
-  const format = lengthFormat(loaded.record.survey.units, company.fraction)
+  const format = lengthFormat(loaded.record.survey.units, FINEST)
   if (checks.corners.length === 0) return null
   return (
     <section aria-label="Corners" className="flex flex-col gap-5">

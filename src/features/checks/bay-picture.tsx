@@ -5,8 +5,8 @@ const WIDTH = 420
 
 interface BayPictureProps extends BayDrawn {
   format: LengthFormat
-  /** Whether no opening lets the sphere through. */
-  holds: boolean
+  /** Whether the openings, and the stair’s triangle, keep their spheres out. */
+  holds: { openings: boolean; triangle: boolean }
 }
 
 /** The opening picture: a bay to scale with the rules' sphere in its widest opening. */
@@ -37,21 +37,25 @@ export function BayPicture({ format, holds, ...drawn }: BayPictureProps) {
       {shape.cables.map((line, i) => (
         <Line key={i} line={line} className="stroke-steel" width={1.2} />
       ))}
-      {sphere ? (
-        <circle
-          cx={sphere.centre.x}
-          cy={sphere.centre.y}
-          r={sphere.radius}
-          className={holds ? 'fill-none stroke-spruce' : 'fill-stop-ground stroke-stop'}
-          strokeWidth="1.5"
-          strokeDasharray={holds ? undefined : '4 3'}
-        />
-      ) : null}
+      {sphere ? <Sphere {...sphere} holds={holds.openings} /> : null}
+      {shape.triangle ? <Sphere {...shape.triangle} holds={holds.triangle} /> : null}
       {opening ? <Dimension line={opening} label={writeLength(bay.openings.between ?? 0, format)} /> : null}
       <Dimension line={below(span)} label={writeLength(bay.span, format)} />
     </svg>
   )
 }
+
+/** Whole where it is kept out; broken, and in the colour of a stop, where it passes. */
+const Sphere = ({ centre, radius, holds }: { centre: Spot; radius: number; holds: boolean }) => (
+  <circle
+    cx={centre.x}
+    cy={centre.y}
+    r={radius}
+    className={holds ? 'fill-none stroke-spruce' : 'fill-stop-ground stroke-stop'}
+    strokeWidth="1.5"
+    strokeDasharray={holds ? undefined : '4 3'}
+  />
+)
 
 const below = ([from, to]: Stretch): Stretch => [
   { x: from.x, y: from.y + 10 },

@@ -20,12 +20,15 @@ export interface BaySectionProps extends BayDrawn {
   leastPush: number | undefined
 }
 
-const openingCodes = ['opening-between', 'opening-bottom', 'opening-top', 'opening-stair-triangle']
+const openingCodes = ['opening-between', 'opening-bottom', 'opening-top']
 
 /** One bay: its opening picture and the figures an inspector asks for. */
 export function BaySection(props: BaySectionProps) {
   const { bay, run, found, format, guardHeight, postWidth, diameter } = props
-  const holds = !openingCodes.some((code) => found.has(code))
+  const holds = {
+    openings: !openingCodes.some((code) => found.has(code)),
+    triangle: !found.has('opening-stair-triangle'),
+  }
   return (
     <section aria-label={`Bay ${bay.bay}`} className="flex flex-col gap-3">
       <h3 className="font-semibold">

@@ -20,6 +20,8 @@ export interface BayShape {
   spacers: readonly Stretch[]
   /** The sphere that must not pass, in the widest opening. */
   sphere?: { centre: Spot; radius: number }
+  /** The largest sphere that stands in the triangle of the first step. */
+  triangle?: { centre: Spot; radius: number }
   /** Where the widest opening is measured, cable to cable. */
   opening?: Stretch
   span: Stretch
@@ -96,8 +98,20 @@ export function bayShape({ bay, run, guardHeight, postWidth, diameter }: BayDraw
             at(middle, upper - diameter / 2 / Math.cos(theta)),
           ] as const,
         }),
+    ...triangleOf(bay, { at, scale, across }),
     span: [at(0, 0), at(across / (spacers + 1), 0)],
   }
+}
+
+/** The sphere touches tread, riser and lowest member: it stands its radius away from the step’s inner corner. */
+function triangleOf(
+  { triangle }: BayCheck,
+  { at, scale, across }: { at: (along: number, height: number) => Spot; scale: number; across: number },
+): Pick<BayShape, 'triangle'> {
+  if (!triangle || triangle.tread > across) return {}
+  const radius = (triangle.sphere / 2) * scale
+  const corner = at(triangle.tread, -triangle.riser)
+  return { triangle: { centre: { x: corner.x - radius, y: corner.y - radius }, radius } }
 }
 
 /** Treads and risers below the nosing line, from the lower post up. */

@@ -37,7 +37,7 @@ export function PostSection({ post, found, format, figures }: PostSectionProps) 
       ? {
           label: 'Allowed in bending',
           value: figures.stress(allowable.stress),
-          note: `${allowable.lumber.name}: Fb ${figures.stress(allowable.lumber.bending)} × C_F ${allowable.lumber.sizeFactor} × C_M ${allowable.wetFactor}; all other factors are the engineer’s`,
+          note: `${allowable.lumber.name}: Fb ${figures.stress(allowable.lumber.bending)} × size factor ${allowable.lumber.sizeFactor} × wet factor ${allowable.wetFactor}; all others are the engineer’s`,
         }
       : { label: 'Allowed in bending', value: 'ask the engineer', note: `core: ${post.core ?? 'not noted'}` },
     ...(post.topLoad

@@ -1,6 +1,6 @@
 import { type ReactNode, useState } from 'react'
 import type { Finding } from '@shared/schemas/finding'
-import type { Overruling } from '@shared/survey/overrule'
+import { mayBeOverruled, type Overruling } from '@shared/survey/overrule'
 import { Button } from '@/components/button'
 import { FindingItem } from '@/components/finding-mark'
 import { momentText } from '@/lib/date-text'
@@ -29,7 +29,7 @@ export function JudgedFinding({ finding, overruling, overruler, goThere }: Judge
   return (
     <FindingItem finding={finding} muted={stands} action={goThere}>
       {overruling ? <OverrulingText overruling={overruling} /> : null}
-      {overruler && finding.level === 'stop' ? (
+      {overruler && finding.level === 'stop' && mayBeOverruled(finding) ? (
         asking ? (
           <OverruleForm
             onOverrule={async (reason) => {
