@@ -4,7 +4,7 @@ import type { LengthFormat } from '@shared/units/format-length'
 import { moneyToMain } from '@shared/units/money'
 import { Length } from '@/components/length'
 import { cableWords } from './cable-words'
-import { type Fact, FactList } from './fact-list'
+import { type Fact, FactList } from '@/components/fact-list'
 import { StiffnessNote } from './stiffness-note'
 import { forceText } from './words'
 

@@ -11,8 +11,8 @@ import { type CableChoice, FittingUses } from './fitting-uses'
 import { angleWords, fittingExtras, fittingLengths, priceWords } from './fitting-words'
 import { NameFields } from './name-fields'
 import { PriceField } from './price-field'
-import { refusalAt } from './refusal'
-import { SafeForm } from './safe-form'
+import { refusalAt } from '@/lib/refusal'
+import { SafeForm } from '@/components/safe-form'
 import { mountWords } from './words'
 
 interface FittingFormProps {

@@ -5,7 +5,7 @@ import type { Length } from '@shared/units/length'
 import { LengthField } from '@/components/length-field'
 import { CheckList } from './check-list'
 import { suitWords } from './fitting-words'
-import { allowed, refusalAt } from './refusal'
+import { allowed, refusalAt } from '@/lib/refusal'
 
 export interface CableChoice {
   id: string

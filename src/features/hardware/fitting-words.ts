@@ -1,5 +1,5 @@
 import type { Fitting } from '@shared/schemas/hardware'
-import { allowed } from './refusal'
+import { allowed } from '@/lib/refusal'
 
 interface LengthWords<Key extends keyof Fitting> {
   key: Key

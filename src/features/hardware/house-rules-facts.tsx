@@ -1,6 +1,6 @@
 import type { HouseRules } from '@shared/schemas/house-rules'
 import { Card } from '@/components/page'
-import { FactList } from './fact-list'
+import { FactList } from '@/components/fact-list'
 import { LumberFacts } from './lumber-rules'
 import { ruleGroups } from './rule-list'
 import { RuleValue } from './rule-value'

@@ -9,7 +9,7 @@ import { LumberRules } from './lumber-rules'
 import { RuleField } from './rule-field'
 import { ruleGroups } from './rule-list'
 import type { HouseUnits } from './rule-values'
-import { SafeForm } from './safe-form'
+import { SafeForm } from '@/components/safe-form'
 
 interface HouseRulesFormProps {
   rules: HouseRules

@@ -1,5 +1,5 @@
 import { TextField } from '@/components/field'
-import { allowed, refusalAt } from './refusal'
+import { allowed, refusalAt } from '@/lib/refusal'
 
 interface NameFieldsProps {
   value: { id: string; name: string }

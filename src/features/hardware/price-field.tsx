@@ -1,6 +1,6 @@
 import { type Money, moneyFromMain, moneyToMain } from '@shared/units/money'
 import { NumberField } from '@/components/number-field'
-import { allowed, refusalAt } from './refusal'
+import { allowed, refusalAt } from '@/lib/refusal'
 
 interface PriceFieldProps {
   label: string

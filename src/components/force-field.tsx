@@ -1,5 +1,5 @@
 import { type Force, newtons, poundsForce, toPoundsForce } from '@shared/units/force'
-import { NumberField } from '@/components/number-field'
+import { NumberField } from './number-field'
 
 interface ForceFieldProps {
   label: string

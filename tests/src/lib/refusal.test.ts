@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { ApiError, offline } from '@/lib/api-error'
-import { allowed, refusalAt, whyNotSaved } from '../../../../src/features/hardware/refusal'
+import { allowed, refusalAt, whyNotSaved } from '@/lib/refusal'
 
 const schema = new ApiError('not-valid', 400, 'takeUp: Too small', [
   { path: 'takeUp', message: 'Too small: expected number to be >=1' },

@@ -1,7 +1,7 @@
 import { type ReactNode, useEffect, useRef } from 'react'
-import { Button } from '@/components/button'
-import { ErrorNote } from '@/components/states'
-import { whyNotSaved } from './refusal'
+import { whyNotSaved } from '@/lib/refusal'
+import { Button } from './button'
+import { ErrorNote } from './states'
 
 interface SafeFormProps {
   onSave: () => void
