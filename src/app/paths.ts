@@ -22,7 +22,7 @@ export const paths = {
   houseRules: '/house-rules',
   guardRules: '/guard-rules',
   newGuardRules: (from: string) => `/guard-rules/new?from=${encodeURIComponent(from)}`,
-  guardRulesOf: (id: string) => `/guard-rules/${encodeURIComponent(id)}`,
+  guardRulesOf: (id: string) => `/guard-rules/${id}`,
   people: '/people',
   company: '/company',
   account: '/account',
