@@ -4,6 +4,7 @@ import {
   CircleUserRound,
   LogOut,
   Ruler,
+  Scale,
   SunMoon,
   Users,
   Wrench,
@@ -22,13 +23,26 @@ import { applyTheme, readTheme, type Theme } from '@/lib/theme'
 import { OfflineBanner } from './offline-banner'
 import { paths } from './paths'
 
-const places: { to: string; label: string; Icon: ComponentType<{ className?: string }> }[] = [
+interface Place {
+  to: string
+  label: string
+  Icon: ComponentType<{ className?: string }>
+}
+
+const places: Place[] = [
   { to: paths.jobs, label: 'Jobs', Icon: BriefcaseBusiness },
   { to: paths.hardware, label: 'Hardware', Icon: Wrench },
   { to: paths.houseRules, label: 'House rules', Icon: Ruler },
   { to: paths.people, label: 'People', Icon: Users },
   { to: paths.company, label: 'Company', Icon: Building2 },
 ]
+
+/** On a desk there is room for the rules of the code too; on a phone the house rules lead to them. */
+const deskPlaces: Place[] = places.toSpliced(3, 0, {
+  to: paths.guardRules,
+  label: 'Guard rules',
+  Icon: Scale,
+})
 
 /** The frame of every page but the editor: a bar at the top on a desk, one under the thumb on a phone. */
 export default function Frame({ session }: { session: Session }) {
@@ -41,7 +55,7 @@ export default function Frame({ session }: { session: Session }) {
             <Brand />
           </Link>
           <nav aria-label="Main" className="hidden flex-1 gap-1 md:flex">
-            {places.map(({ to, label }) => (
+            {deskPlaces.map(({ to, label }) => (
               <NavLink
                 key={to}
                 to={to}

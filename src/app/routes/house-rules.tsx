@@ -1,4 +1,5 @@
 import { useQuery } from '@tanstack/react-query'
+import { ButtonLink } from '@/components/button'
 import { Page } from '@/components/page'
 import { ErrorNote, Loading } from '@/components/states'
 import { houseRulesQuery } from '@/features/hardware/api/read-house-rules'
@@ -7,6 +8,7 @@ import { HouseRulesForm } from '@/features/hardware/house-rules-form'
 import { useMay, useSession } from '@/features/session/session'
 import { messageOf } from '@/lib/api-error'
 import { lengthFormat } from '../length-format'
+import { paths } from '../paths'
 
 export function Component() {
   const { company } = useSession()
@@ -14,7 +16,7 @@ export function Component() {
   const { data, error, isPending, refetch } = useQuery(houseRulesQuery)
   const units = { force: company.units.force, format: lengthFormat(company.units, 64) }
   return (
-    <Page title="House rules">
+    <Page title="House rules" actions={<ButtonLink to={paths.guardRules}>Guard rules</ButtonLink>}>
       <p className="mb-4 text-soft">
         {mayEdit
           ? 'Tolerances, limits and defaults of your company. Every cut list is worked out with them.'
