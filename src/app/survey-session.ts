@@ -2,6 +2,7 @@ import { useQuery } from '@tanstack/react-query'
 import { useBlocker } from 'react-router-dom'
 import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
 import { surveyFindings } from '@shared/calculation/survey-findings'
+import type { OwnGuardRules } from '@shared/schemas/catalogue'
 import type { GuardRules } from '@shared/schemas/guard-rules'
 import type { Hardware } from '@shared/schemas/hardware'
 import type { HouseRules } from '@shared/schemas/house-rules'
@@ -42,6 +43,7 @@ export interface Loaded {
   rules: HouseRules
   /** The company’s own, retired ones too: a survey may name them still. */
   guardRules: GuardRules[]
+  retiredRules: ReadonlySet<string>
 }
 
 /** What a survey's screens need before they can begin; `stale` says why what is shown could not be read again. */
@@ -59,13 +61,18 @@ export function useSurveyData(surveyId: string) {
   const retry = () => {
     for (const query of [record, catalogue, rules, own]) if (query.error) void query.refetch()
   }
-  const guardRules = useMemo(() => own.data?.map((entry) => entry.rules), [own.data])
+  const ownRules = useMemo(() => own.data && splitRules(own.data), [own.data])
   const data: Loaded | undefined =
-    record.data && hardware && rules.data && guardRules
-      ? { record: record.data, hardware, rules: rules.data, guardRules }
+    record.data && hardware && rules.data && ownRules
+      ? { record: record.data, hardware, rules: rules.data, ...ownRules }
       : undefined
   return { data, error: data ? null : error, stale: data ? error : null, readAt: record.dataUpdatedAt, retry }
 }
+
+const splitRules = (own: readonly OwnGuardRules[]): Pick<Loaded, 'guardRules' | 'retiredRules'> => ({
+  guardRules: own.map(({ rules }) => rules),
+  retiredRules: new Set(own.flatMap(({ retired, rules }) => (retired ? [rules.id] : []))),
+})
 
 /** Opens a survey for editing; what is loaded afterwards does not disturb the copy in hand. */
 export function useSurveySession(loaded: Loaded): SurveySession {
@@ -95,6 +102,7 @@ export function useSurveySession(loaded: Loaded): SurveySession {
       hardware: loaded.hardware,
       rules: loaded.rules,
       guardRules: loaded.guardRules,
+      retiredRules: loaded.retiredRules,
       findings,
       units: survey.units,
       fraction: company.fraction,

@@ -31,7 +31,7 @@ export function Component() {
       {known && !mayEdit ? (
         <>
           <p className="mb-4 text-soft">An owner of your company changes it.</p>
-          <FittingFacts fitting={known.fitting} cables={cables} format={format} />
+          <FittingFacts fitting={known.fitting} cables={cables} format={format} force={company.units.force} />
         </>
       ) : null}
       {data && mayEdit && (key === undefined || known) ? (
@@ -40,6 +40,7 @@ export function Component() {
           {...(known ? { known } : {})}
           cables={cables}
           format={format}
+          force={company.units.force}
           onSaved={() => {
             sayDone('The fitting is saved.')
             void navigate(paths.hardware)

@@ -1,22 +1,31 @@
 import type { Fitting } from '@shared/schemas/hardware'
 import { materials } from '@shared/schemas/post'
+import type { Units } from '@shared/schemas/quantities'
 import type { LengthFormat } from '@shared/units/format-length'
 import { moneyToMain } from '@shared/units/money'
 import { Length } from '@/components/length'
 import { type Fact, FactList } from '@/components/fact-list'
 import { FittingDrawing } from './fitting-drawing'
 import type { CableChoice } from './fitting-uses'
-import { angleWords, fittingExtras, fittingLengths, priceWords, suitWords } from './fitting-words'
-import { mountWords } from './words'
+import {
+  angleWords,
+  fittingExtras,
+  fittingLengths,
+  priceWords,
+  ratingWords,
+  suitWords,
+} from './fitting-words'
+import { forceText, mountWords } from './words'
 
 interface FittingFactsProps {
   fitting: Fitting
   cables: readonly CableChoice[]
   format: LengthFormat
+  force: Units['force']
 }
 
 /** A fitting for those who may not change it. */
-export function FittingFacts({ fitting, cables, format }: FittingFactsProps) {
+export function FittingFacts({ fitting, cables, format, force }: FittingFactsProps) {
   const length = (value: number | undefined) =>
     value === undefined ? 'not set' : <Length value={value} format={format} />
   const grips = materials.filter((material) => fitting.minGrip[material] !== undefined)
@@ -29,6 +38,11 @@ export function FittingFacts({ fitting, cables, format }: FittingFactsProps) {
       meaning: hint,
     })),
     { label: angleWords.label, value: `${fitting.maxAngle}°`, meaning: angleWords.hint },
+    {
+      label: ratingWords.label,
+      value: fitting.rating === undefined ? 'not set' : forceText(fitting.rating, force),
+      meaning: ratingWords.hint,
+    },
     {
       label: priceWords.label,
       value: fitting.price === undefined ? 'not set' : moneyToMain(fitting.price).toFixed(2),

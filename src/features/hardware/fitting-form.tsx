@@ -1,17 +1,19 @@
 import { useState } from 'react'
 import type { Fitting } from '@shared/schemas/hardware'
+import type { Units } from '@shared/schemas/quantities'
 import type { LengthFormat } from '@shared/units/format-length'
 import { inches } from '@shared/units/length'
 import { ChoiceGroup } from '@/components/choices'
+import { ForceField } from '@/components/force-field'
 import { LengthField } from '@/components/length-field'
 import { NumberField } from '@/components/number-field'
 import { useSaveFitting } from './api/save-fitting'
 import { FittingDrawing } from './fitting-drawing'
 import { type CableChoice, FittingUses } from './fitting-uses'
-import { angleWords, fittingExtras, fittingLengths, priceWords } from './fitting-words'
+import { angleWords, fittingExtras, fittingLengths, priceWords, ratingWords } from './fitting-words'
 import { NameFields } from './name-fields'
 import { PriceField } from './price-field'
-import { refusalAt } from '@/lib/refusal'
+import { allowed as allowedIn, refusalAt } from '@/lib/refusal'
 import { SafeForm } from '@/components/safe-form'
 import { mountWords } from './words'
 
@@ -20,6 +22,7 @@ interface FittingFormProps {
   known?: { key: string; fitting: Fitting }
   cables: readonly CableChoice[]
   format: LengthFormat
+  force: Units['force']
   onSaved: () => void
 }
 
@@ -39,7 +42,7 @@ const blank: Fitting = {
 }
 const mounts = (['drilled', 'surface'] as const).map((value) => ({ value, label: mountWords[value].long }))
 
-export function FittingForm({ known, cables, format, onSaved }: FittingFormProps) {
+export function FittingForm({ known, cables, format, force, onSaved }: FittingFormProps) {
   const [fitting, setFitting] = useState<Fitting>(
     known?.fitting ?? { ...blank, cables: cables.map(({ id }) => id) },
   )
@@ -93,6 +96,13 @@ export function FittingForm({ known, cables, format, onSaved }: FittingFormProps
           value={fitting.maxAngle}
           error={refusalAt(error, 'maxAngle', 'Write an angle from 0° to 90°.')}
           onChange={(value) => set({ maxAngle: value ?? 0 })}
+        />
+        <ForceField
+          {...ratingWords}
+          unit={force}
+          value={fitting.rating}
+          error={refusalAt(error, 'rating', allowedIn.force)}
+          onChange={(rating) => set({ rating })}
         />
         <PriceField
           {...priceWords}

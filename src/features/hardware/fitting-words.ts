@@ -59,6 +59,10 @@ export const angleWords = {
   label: 'Largest angle',
   hint: 'Between the cable and a line square to the post’s face; a stair’s pitch must be within it.',
 }
+export const ratingWords = {
+  label: 'Rating',
+  hint: 'The most it may be loaded with, as its maker says; left empty, nothing is held against it.',
+}
 export const priceWords = {
   label: 'Price each',
   hint: 'Decides between fittings whose bodies are equally long; left empty it comes last.',

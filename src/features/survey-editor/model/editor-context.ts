@@ -19,6 +19,8 @@ export interface EditorView {
   rules: HouseRules
   /** The company’s own guard rules, retired ones too. */
   guardRules: GuardRules[]
+  /** Ids of the retired ones, which are no longer offered. */
+  retiredRules: ReadonlySet<string>
   /** Everything noticed about the survey as it stands, the gravest first. */
   findings: readonly Finding[]
   units: Units

@@ -10,6 +10,7 @@ import { formatOf } from './format-of'
 import { dressedSizes } from './lumber'
 import { MeasureField } from './measure-field'
 import { PanelFindings } from './panel-findings'
+import { PostStrengthFields } from './post-strength-fields'
 import type { PanelProps } from './selection-panel'
 
 type Fields = Omit<Post, 'id'>
@@ -113,6 +114,7 @@ export function PostPanel({ view, actions, post }: PanelProps & { post: Post }) 
           onChange={(across) => set({ across })}
         />
       </div>
+      <PostStrengthFields view={view} post={post} onChange={set} />
       <CornerField view={view} actions={actions} post={post.id} />
       {canEdit && <SameForOthers view={view} actions={actions} post={post} />}
       <TextField

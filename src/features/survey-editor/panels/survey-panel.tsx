@@ -4,6 +4,7 @@ import type { Length } from '@shared/units/length'
 import { ChoiceGroup } from '@/components/choices'
 import { TextField } from '@/components/field'
 import { formatOf } from './format-of'
+import { GuardRulesFields } from './guard-rules-fields'
 import { MeasureField } from './measure-field'
 import type { PanelProps } from './selection-panel'
 
@@ -40,6 +41,7 @@ export function SurveyPanel({ view, actions }: PanelProps) {
   const sphere = (key: 'sphere' | 'stairSphere', label: string) => (
     <MeasureField
       label={label}
+      hint="left empty, that of the rules"
       value={guard[key]}
       format={formatOf(view)}
       disabled={!canEdit}
@@ -72,6 +74,7 @@ export function SurveyPanel({ view, actions }: PanelProps) {
         disabled={!canEdit}
         onChange={(length) => set({ units: { length, force: length === 'in' ? 'lbf' : 'N' } })}
       />
+      <GuardRulesFields view={view} actions={actions} />
       <fieldset className="grid grid-cols-2 gap-3" disabled={!canEdit}>
         <legend className="mb-2 text-lg font-semibold">Guard</legend>
         {height('Height', guard.height, (given) => ({ height: given }))}
@@ -97,10 +100,6 @@ export function SurveyPanel({ view, actions }: PanelProps) {
         }))}
       </fieldset>
       <StairGuard view={view} actions={actions} />
-      <p className="text-sm text-soft">
-        Starting heights follow IRC 2021, R312.1, for one- and two-family dwellings. Local code, the authority
-        having jurisdiction and a licensed engineer decide.
-      </p>
     </div>
   )
 }
