@@ -37,6 +37,19 @@ export async function openJob(page: Page, job: NewJob): Promise<{ id: string }> 
   return (await answer.json()) as { id: string }
 }
 
+/** Brings a survey file into a new job, without the form. @returns the survey's address */
+export async function importSurvey(page: Page, file: object): Promise<string> {
+  const job = await openJob(page, { title: 'Imported' })
+  const session = (await (await page.request.get('/api/session')).json()) as { csrfToken: string }
+  const answer = await page.request.post(`/api/jobs/${job.id}/surveys/import`, {
+    data: file,
+    headers: { 'x-csrf-token': session.csrfToken },
+  })
+  expect(answer.status()).toBe(201)
+  const { survey } = (await answer.json()) as { survey: { id: string } }
+  return `/surveys/${survey.id}`
+}
+
 /** The title of every job that the list shows, from the top. */
 export const jobsShown = (page: Page, titles: readonly string[]) =>
   page
