@@ -4,7 +4,7 @@ import type { companies, people } from '../database/tables/index'
 import type { SignedIn } from './signed-in'
 
 type PersonRow = typeof people.$inferSelect
-type CompanyRow = Omit<typeof companies.$inferSelect, 'lastJobNumber' | 'createdAt'>
+type CompanyRow = typeof companies.$inferSelect
 
 /** A company as everybody in it sees it. */
 export const presentCompany = (row: CompanyRow): Company => ({

@@ -1,49 +1,20 @@
-import { and, eq, isNull, lt, ne, sql } from 'drizzle-orm'
-import type { Database, OpenDatabase } from '../database/client'
+import { and, eq, gt, isNull, lt, ne, sql } from 'drizzle-orm'
+import type { Database } from '../database/client'
 import { companies, people, sessions } from '../database/tables/index'
-import { toSignedIn } from './account'
-import type { SignedIn } from './signed-in'
-
-/** What is read of a session, each under the name it has in `FoundRow`. */
-const columns = {
-  data: sql`${sessions.data}`.as('data'),
-  whose: sql`${sessions.personId}`.as('whose'),
-  id: sql`${people.id}`.as('id'),
-  companyId: sql`${people.companyId}`.as('companyId'),
-  name: sql`${people.name}`.as('name'),
-  email: sql`${people.email}`.as('email'),
-  roles: sql`${people.roles}`.as('roles'),
-  lastSignInAt: sql`${people.lastSignInAt}`.as('lastSignInAt'),
-  companyName: sql`${companies.name}`.as('companyName'),
-  lengthUnit: sql`${companies.lengthUnit}`.as('lengthUnit'),
-  forceUnit: sql`${companies.forceUnit}`.as('forceUnit'),
-  fraction: sql`${companies.fraction}`.as('fraction'),
-  keepPhotoPlace: sql`${companies.keepPhotoPlace}`.as('keepPhotoPlace'),
-} satisfies Record<keyof FoundRow, unknown>
-
-type PersonRow = Pick<typeof people.$inferSelect, 'companyId' | 'name' | 'email' | 'roles'>
-type CompanyRow = Pick<
-  typeof companies.$inferSelect,
-  'lengthUnit' | 'forceUnit' | 'fraction' | 'keepPhotoPlace'
->
-/** As the driver gives it; where there is no person, all that is theirs is null. */
-interface FoundRow extends PersonRow, CompanyRow {
-  data: unknown
-  /** Whose session it was made for. */
-  whose: string | null
-  id: string | null
-  lastSignInAt: string | null
-  companyName: string
-}
 
 /**
  * Finds a session that has not ended, with the person and company it is for; a disabled person's session is nobody's.
- * Every request asks this: it is put together once, PostgreSQL plans it once per connection, and it is one message
- * there and one back.
+ * Every request asks this, so it is put together once and PostgreSQL plans it once per connection.
  */
-export function sessionFinder({ database, sql: driver }: OpenDatabase) {
-  const { sql: text } = database
-    .select(columns)
+export function sessionFinder(database: Database) {
+  const { id, companyId, name, email, roles, lastSignInAt } = people
+  const query = database
+    .select({
+      data: sessions.data,
+      personId: sessions.personId,
+      person: { id, companyId, name, email, roles, lastSignInAt },
+      company: companies,
+    })
     .from(sessions)
     .leftJoin(
       people,
@@ -54,26 +25,14 @@ export function sessionFinder({ database, sql: driver }: OpenDatabase) {
       ),
     )
     .leftJoin(companies, eq(companies.id, people.companyId))
-    .where(and(sql`${sessions.idHash} = $1`, sql`${sessions.expiresAt} > $2::timestamptz`))
-    .toSQL()
-  return async (idHash: string, now: Date): Promise<FoundSession | undefined> => {
-    const [row] = await driver.unsafe<FoundRow[]>(text, [idHash, now.toISOString()], { prepare: true })
-    return row && { data: row.data, personId: row.whose, account: accountOf(row) }
-  }
-}
-
-export interface FoundSession {
-  data: unknown
-  /** Whose session it was made for; nobody's before sign-in. */
-  personId: string | null
-  /** None where that person is disabled now. */
-  account: SignedIn | undefined
-}
-
-function accountOf({ id, lastSignInAt, companyName, ...row }: FoundRow): SignedIn | undefined {
-  if (id === null) return undefined
-  const person = { ...row, id, lastSignInAt: lastSignInAt === null ? null : new Date(lastSignInAt) }
-  return toSignedIn(person, { ...row, id: row.companyId, name: companyName })
+    .where(
+      and(
+        eq(sessions.idHash, sql.placeholder('idHash')),
+        gt(sessions.expiresAt, sql`${sql.placeholder('now')}::timestamptz`),
+      ),
+    )
+    .prepare('session')
+  return async (idHash: string, now: Date) => (await query.execute({ idHash, now: now.toISOString() }))[0]
 }
 
 type SessionRow = typeof sessions.$inferInsert

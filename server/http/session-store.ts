@@ -1,7 +1,8 @@
 import { createHash } from 'node:crypto'
 import type { Request } from 'express'
 import { type Session, type SessionData, Store } from 'express-session'
-import type { Database, OpenDatabase } from '../database/client'
+import type { Database } from '../database/client'
+import { toSignedIn } from './account'
 import {
   deleteExpiredSessions,
   deleteSession,
@@ -20,25 +21,23 @@ export const hashSessionId = (id: string): string => createHash('sha256').update
 
 type Done = (error?: unknown) => void
 /** What `get` hands to `createSession` beside the data, out of the way of whoever writes or compares these. */
-type HandedOver = SessionData & { account?: SignedIn }
+type FoundSession = SessionData & { account?: SignedIn }
 
 /**
  * Sessions in PostgreSQL. One query reads the session, its person and their company, so a request costs one look-up
  * and a person who was disabled or changed is seen as they are now.
  */
 export class SessionStore extends Store {
-  private readonly database: Database
   private readonly find: ReturnType<typeof sessionFinder>
   /** When sessions that have ended were last cleared away. */
   private sweptAt = 0
 
   constructor(
-    open: OpenDatabase,
+    private readonly database: Database,
     private readonly clock: () => Date,
   ) {
     super()
-    this.database = open.database
-    this.find = sessionFinder(open)
+    this.find = sessionFinder(database)
   }
 
   override get(id: string, done: (error: unknown, session?: SessionData | null) => void): void {
@@ -59,7 +58,7 @@ export class SessionStore extends Store {
   }
 
   /** Makes the session of a request, and its person. */
-  override createSession(request: Request, found: HandedOver): Session & SessionData {
+  override createSession(request: Request, found: FoundSession): Session & SessionData {
     const session = super.createSession(request, found)
     hide(session, 'known', true)
     request.user = found.account
@@ -74,9 +73,9 @@ export class SessionStore extends Store {
     const row = await this.find(hashSessionId(id), this.clock())
     if (!row) return null
     // A session that was somebody's and is nobody's now belongs to a disabled person.
-    if (row.personId !== null && !row.account) return null
+    if (row.personId !== null && !row.person) return null
     const found = row.data as SessionData
-    if (row.account) hide(found, 'account', row.account)
+    if (row.person && row.company) hide(found, 'account', toSignedIn(row.person, row.company))
     return found
   }
 

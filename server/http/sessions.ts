@@ -8,12 +8,12 @@ export const cookieName = ({ secureCookies }: Config): string =>
   secureCookies ? '__Host-tautbook' : 'tautbook'
 
 /** Sessions in the database and the person they are for on every request. */
-export function sessions({ config, open, clock }: Services): RequestHandler[] {
+export function sessions({ config, database, clock }: Services): RequestHandler[] {
   return [
     session({
       name: cookieName(config),
       secret: config.sessionSecret,
-      store: new SessionStore(open, clock),
+      store: new SessionStore(database, clock),
       resave: false,
       saveUninitialized: false,
       cookie: {

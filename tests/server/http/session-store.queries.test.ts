@@ -34,30 +34,30 @@ beforeEach(async () => {
 
 describe('looking a session up', () => {
   it('brings its data, the person and their company, read in one go', async () => {
-    expect(await sessionFinder(open)(idHash, now)).toMatchObject({
+    expect(await sessionFinder(open.database)(idHash, now)).toMatchObject({
       data: { csrf: 'token' },
       personId: person.id,
-      account: {
+      person: {
         id: person.id,
         companyId: person.companyId,
         name: person.name,
         roles: ['owner', 'fitter'],
-        lastSignIn: '2026-05-01T08:00:00.250Z',
-        company: { id: person.companyId, units: { length: 'in', force: 'lbf' }, fraction: 16 },
+        lastSignInAt: new Date('2026-05-01T08:00:00.250Z'),
       },
+      company: { id: person.companyId, lengthUnit: 'in', forceUnit: 'lbf', fraction: 16 },
     })
   })
 
   it('finds nothing once it has ended, and nobody where the person is disabled', async () => {
-    const find = sessionFinder(open)
+    const find = sessionFinder(open.database)
     expect(await find(idHash, new Date('2026-05-14T10:00:01Z'))).toBeUndefined()
     expect(await find('another', now)).toBeUndefined()
     await test.database.update(people).set({ disabledAt: now })
-    expect(await find(idHash, now)).toMatchObject({ personId: person.id, account: undefined })
+    expect(await find(idHash, now)).toMatchObject({ personId: person.id, person: null })
   })
 
   it('is read by PostgreSQL once per connection, however often it is asked', async () => {
-    const find = sessionFinder(open)
+    const find = sessionFinder(open.database)
     for (let i = 0; i < 3; i += 1) await find(idHash, now)
     const known = await open.sql<{ statement: string }[]>`
       select statement from pg_prepared_statements where statement like ${'%from "sessions"%'}`

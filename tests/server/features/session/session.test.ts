@@ -143,7 +143,7 @@ describe('a session of somebody disabled', () => {
     const body = { email: person.email, password: testPassword }
     const { headers } = await visitor(test.app).send(accounts.signIn, { body })
     const id = /tautbook=s%3A([^.]+)\./.exec(String(headers['set-cookie']))?.[1] ?? ''
-    const store = new SessionStore(database, () => now)
+    const store = new SessionStore(database.database, () => now)
     const underWay = await new Promise<SessionData>((resolve) =>
       store.get(id, (_error, found) => resolve(found as SessionData)),
     )
