@@ -67,14 +67,14 @@ function followingOf(figures: GuardFigures, format: LengthFormat): Following[] {
   ]
 }
 
-/** What the rules ask for, as a sentence or two. */
+/** What the rules ask for, as a sentence; on stairs only where that is another figure. */
 export const AskedHeightsText = ({ asked, format }: { asked: AskedHeights; format: LengthFormat }) => (
   <p>
-    These rules ask for <Length value={asked.height.value} format={format} />{' '}
+    These rules ask for <Length value={asked.height.value} format={format} />,{' '}
     <RuleSource source={asked.height} />
-    {asked.stair ? (
+    {asked.stair && asked.stair !== asked.height ? (
       <>
-        , on stairs <Length value={asked.stair.value} format={format} /> <RuleSource source={asked.stair} />
+        ; on stairs <Length value={asked.stair.value} format={format} />, <RuleSource source={asked.stair} />
       </>
     ) : null}
     .

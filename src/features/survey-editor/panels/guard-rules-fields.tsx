@@ -95,7 +95,7 @@ function HeightOffer({ view, actions, justChosen }: PanelProps & { justChosen: b
   const stair = change.stair && asked.stair ? writeLength(asked.stair.value, formatOfRules(rules)) : undefined
   const use = () => {
     actions.perform({ type: 'guard.set', set: change, unset: [] })
-    sayDone(`The guard has the height the rules ask for.`, actions.undo)
+    sayDone('The guard has the height the rules ask for.', actions.undo)
   }
   return (
     <div className="flex flex-col gap-2 rounded border border-rule bg-paper p-3" role="status">
@@ -104,7 +104,7 @@ function HeightOffer({ view, actions, justChosen }: PanelProps & { justChosen: b
         <Button onClick={use}>
           {change.height === undefined
             ? `Make it ${stair ?? height} on stairs`
-            : `Make the guard ${height} high${stair === undefined ? '' : `, ${stair} on stairs`}`}
+            : `Make the guard ${height} high${stair === undefined || stair === height ? '' : `, ${stair} on stairs`}`}
         </Button>
       ) : null}
     </div>
