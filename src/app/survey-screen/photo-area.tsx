@@ -1,17 +1,17 @@
-import { type ReactNode, useState } from 'react'
-import { nextId } from '@shared/survey/next-id'
+import type { ReactNode } from 'react'
 import { EmptyState } from '@/components/states'
 import { sayProblem } from '@/components/toast'
 import { AddPhoto } from '@/features/survey-editor/chrome/add-photo'
 import { PhotoStrip } from '@/features/survey-editor/chrome/photo-strip'
+import { UnsentPhotos } from '@/features/survey-editor/chrome/unsent-photos'
 import { PlacingStrip } from '@/features/survey-editor/chrome/placing-strip'
 import type { EditorState } from '@/features/survey-editor/model/editor-state'
 import { photoOf, unplacedPosts } from '@/features/survey-editor/model/marks'
-import { addPhoto, thumbnailAddress } from '@/features/surveys/api/add-photo'
+import { thumbnailAddress } from '@/features/surveys/api/add-photo'
 import { ButtonLink } from '@/components/button'
-import { messageOf } from '@/lib/api-error'
 import { paths } from '../paths'
 import type { SurveySession } from '../survey-session'
+import { useAddPhoto } from './use-add-photo'
 
 interface PhotoAreaProps {
   session: SurveySession
@@ -23,11 +23,15 @@ interface PhotoAreaProps {
 /** The photo with what lies over it: photos to choose from, posts to place, and the tool's word on what it waits for. */
 export function PhotoArea({ session, state, children }: PhotoAreaProps) {
   const { editor, view, photos } = session
-  const { progress, store } = useAddPhoto(session)
+  const { progress, unsent, store, sendAgain, giveUp } = useAddPhoto(session)
   const adding = { onFile: store, onFault: sayProblem, progress }
+  const waiting = (
+    <UnsentPhotos photos={unsent} busy={progress !== null} onSend={sendAgain} onRemove={giveUp} />
+  )
   if (state.photoId === null) {
     return (
-      <div className="flex flex-1 items-center justify-center p-4">
+      <div className="flex flex-1 flex-col items-center justify-center gap-4 p-4">
+        {waiting}
         <EmptyState
           title="No photo yet"
           action={view.canEdit ? <AddPhoto {...adding} look="first" /> : undefined}
@@ -57,6 +61,7 @@ export function PhotoArea({ session, state, children }: PhotoAreaProps) {
           />
           {view.canEdit && <AddPhoto {...adding} look="further" />}
         </div>
+        {waiting}
         <div className="max-w-full">
           <PlacingStrip posts={placeable} placing={state.placing} onPlace={editor.setPlacing} />
         </div>
@@ -70,25 +75,4 @@ export function PhotoArea({ session, state, children }: PhotoAreaProps) {
       </p>
     </div>
   )
-}
-
-/** Stores a photo and makes it part of the survey. */
-function useAddPhoto({ editor, record, addPhotoRecord }: SurveySession) {
-  const [progress, setProgress] = useState<number | null>(null)
-  const store = (file: File) => {
-    setProgress(0)
-    addPhoto(record.id, file, setProgress)
-      .then((photo) => {
-        const { survey } = editor.getSnapshot()
-        const taken = survey.photos.map(({ id }) => id)
-        const id = taken.includes(photo.surveyPhotoId) ? nextId(taken, 'F') : photo.surveyPhotoId
-        addPhotoRecord(photo)
-        editor.perform({ type: 'photo.add', photo: { id, file: photo.name, posts: {} } })
-        editor.choosePhoto(id)
-        editor.chooseTool('post')
-      })
-      .catch((error: unknown) => sayProblem(messageOf(error)))
-      .finally(() => setProgress(null))
-  }
-  return { progress, store }
 }

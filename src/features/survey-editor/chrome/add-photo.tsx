@@ -33,9 +33,19 @@ export function AddPhoto({ onFile, onFault, progress, look }: AddPhotoProps) {
   }
   if (look === 'further') {
     return (
-      <FileButton onFile={take} className={classes(button, 'border-rule bg-card/95')}>
-        <ImagePlus aria-hidden="true" className="size-5" /> Add photo
-      </FileButton>
+      <>
+        {/* A desk has no camera to point at a deck. */}
+        <FileButton
+          onFile={take}
+          camera
+          className={classes(button, 'border-rule bg-card/95 pointer-fine:hidden')}
+        >
+          <Camera aria-hidden="true" className="size-5" /> Take photo
+        </FileButton>
+        <FileButton onFile={take} className={classes(button, 'border-rule bg-card/95')}>
+          <ImagePlus aria-hidden="true" className="size-5" /> Add photo
+        </FileButton>
+      </>
     )
   }
   return (

@@ -2,7 +2,7 @@ import { surveys } from '@shared/endpoints/surveys'
 import type { Problem } from '@shared/schemas/problem'
 import type { PhotoRecord } from '@shared/schemas/survey-record'
 import { csrfHeader } from '@/lib/api-client'
-import { ApiError, offline } from '@/lib/api-error'
+import { ApiError, offline, unreadable } from '@/lib/api-error'
 
 /** Uploads a photo; `onProgress` is told the share sent. fetch cannot tell it, so this one request is an XMLHttpRequest. */
 export async function addPhoto(
@@ -24,15 +24,12 @@ export async function addPhoto(
     request.upload.onprogress = ({ loaded, total }) => onProgress(total > 0 ? loaded / total : 0)
     request.onerror = () => reject(offline())
     request.onload = () => {
-      if (request.status < 400) return resolve(request.response as PhotoRecord)
-      const problem = request.response as Problem | null
-      reject(
-        new ApiError(
-          problem?.code ?? 'failed',
-          request.status,
-          problem?.detail ?? 'The photo could not be stored. Try again.',
-        ),
-      )
+      const answer = request.response as PhotoRecord | Problem | null
+      // Not JSON: a public network's own page, or a proxy's, whatever its status says.
+      if (answer === null || typeof answer !== 'object') return reject(unreadable())
+      if (request.status < 400) return resolve(answer as PhotoRecord)
+      const { code, detail } = answer as Problem
+      reject(new ApiError(code, request.status, detail))
     }
     request.send(form)
   })
