@@ -8,7 +8,11 @@ interface ForceFieldProps {
   onChange: (value: Force | undefined) => void
   hint?: string
   error?: string | undefined
+  disabled?: boolean
 }
+
+/** What is written as less is nothing. */
+const LEAST = 0.01
 
 /** A force in the company's unit. */
 export function ForceField({ value, unit, onChange, ...rest }: ForceFieldProps) {
@@ -19,8 +23,12 @@ export function ForceField({ value, unit, onChange, ...rest }: ForceFieldProps) 
     <NumberField
       {...rest}
       unit={unit}
+      min={LEAST}
       value={shown}
-      onChange={(given) => onChange(given === undefined ? undefined : read(given))}
+      // The figure shown again is the force as it is, not as it was rounded for showing.
+      onChange={(given) => {
+        if (given !== shown) onChange(given === undefined ? undefined : read(given))
+      }}
     />
   )
 }

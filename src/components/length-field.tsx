@@ -15,6 +15,8 @@ interface LengthFieldProps {
   error?: string | undefined
   disabled?: boolean
   required?: boolean
+  /** Why a length that was understood cannot be taken over; it stays in the field then. */
+  refuse?: (value: LengthValue) => string | undefined
 }
 
 const written = (value: LengthValue | undefined, format: LengthFormat): string =>
@@ -30,16 +32,18 @@ export function LengthField({
   error,
   disabled,
   required,
+  refuse,
 }: LengthFieldProps) {
   const [text, setText] = useState<string | null>(null)
   const house = format.style === 'millimetres' ? 'mm' : 'in'
   const parsed = text === null || text.trim() === '' ? undefined : parseLength(text, { default: house })
-  const fault = parsed && !parsed.ok ? parsed.message : undefined
-  const understood = parsed?.ok ? (
-    <>
-      Understood: <Length value={parsed.length} format={format} />
-    </>
-  ) : undefined
+  const fault = parsed && (parsed.ok ? refuse?.(parsed.length) : parsed.message)
+  const understood =
+    parsed?.ok && fault === undefined ? (
+      <>
+        Understood: <Length value={parsed.length} format={format} />
+      </>
+    ) : undefined
   const commit = () => {
     if (text === null || fault) return
     if (text.trim() === '') {

@@ -1,11 +1,15 @@
+import { useState } from 'react'
+import { calculateSurvey } from '@shared/calculation/calculate-survey'
 import type { CableLayout, Run } from '@shared/schemas/run'
 import { divideRun } from '@shared/survey/divide-run'
-import { toPoundsForce, newtons, poundsForce } from '@shared/units/force'
-import { inches } from '@shared/units/length'
+import { writeForce } from '@shared/units/format-force'
+import { inches, type Length, nanometres } from '@shared/units/length'
 import { Button } from '@/components/button'
 import { ChoiceGroup } from '@/components/choices'
-import { SelectField, TextField } from '@/components/field'
+import { SelectField } from '@/components/field'
+import { ForceField } from '@/components/force-field'
 import { sayDone } from '@/components/toast'
+import type { EditorView } from '../model/editor-context'
 import { formatOf } from './format-of'
 import { HeightsField } from './heights-field'
 import { Readings } from './readings'
@@ -21,12 +25,33 @@ const layouts = [
 
 const layoutOf = (cables: CableLayout) => ('layout' in cables ? cables.layout : 'heights')
 
+/** Where the run's cables stand now, to begin from when they are given one by one. */
+function heightsNow({ survey, hardware, rules }: EditorView, run: Run): Length[] {
+  const found = calculateSurvey({ survey, hardware, rules }).runs.find((each) => each.run === run.id)
+  const heights = found?.cables.map(({ height }) => nanometres(Math.round(height))) ?? []
+  return heights.length > 0 ? heights : [inches(3)]
+}
+
 /** One run: its cable, tension and layout, and an overall reading where one was taken. */
 export function RunPanel({ view, actions, run }: PanelProps & { run: Run }) {
   const { canEdit, hardware } = view
   const set = (cables: CableLayout) =>
     actions.perform({ type: 'run.set', id: run.id, set: { cables }, unset: [] })
-  const spacing = 'layout' in run.cables ? run.cables.spacing : inches(3)
+  // What was set before the layout was changed comes back when it is changed back.
+  const [before, setBefore] = useState<{ spacing?: Length; heights?: Length[] }>({})
+  const setLayout = (layout: 'even' | 'fixed' | 'heights') => {
+    if ('layout' in run.cables) {
+      setBefore((known) => ({ ...known, spacing: 'layout' in run.cables ? run.cables.spacing : undefined }))
+      set(
+        layout === 'heights'
+          ? { heights: before.heights ?? heightsNow(view, run) }
+          : { ...run.cables, layout },
+      )
+    } else if (layout !== 'heights') {
+      setBefore((known) => ({ ...known, heights: 'heights' in run.cables ? run.cables.heights : undefined }))
+      set({ layout, spacing: before.spacing ?? inches(3) })
+    }
+  }
   return (
     <section aria-label={`Run ${run.id}`} className="flex flex-col gap-4">
       <h2 className="text-lg font-semibold">
@@ -51,7 +76,7 @@ export function RunPanel({ view, actions, run }: PanelProps & { run: Run }) {
         choices={layouts}
         value={layoutOf(run.cables)}
         disabled={!canEdit}
-        onChange={(layout) => set(layout === 'heights' ? { heights: [spacing] } : { layout, spacing })}
+        onChange={setLayout}
       />
       {'layout' in run.cables ? (
         <MeasureField
@@ -84,29 +109,21 @@ export function RunPanel({ view, actions, run }: PanelProps & { run: Run }) {
 
 function TensionField({ view, actions, run }: PanelProps & { run: Run }) {
   const { units, rules, canEdit } = view
-  const shown = (force: number) => Number((units.force === 'lbf' ? toPoundsForce(force) : force).toFixed(2))
-  const keep = (text: string, number: number) => {
-    if (text === '') {
-      if (run.tension !== undefined)
-        actions.perform({ type: 'run.set', id: run.id, set: {}, unset: ['tension'] })
-      return
-    }
-    if (!(number > 0)) return
-    const tension = units.force === 'lbf' ? poundsForce(number) : newtons(number)
-    if (tension !== run.tension) actions.perform({ type: 'run.set', id: run.id, set: { tension }, unset: [] })
-  }
   return (
-    <TextField
-      key={run.tension ?? 'house'}
-      label={`Tension, ${units.force}`}
-      hint={`left empty: the house’s ${shown(rules.tension)} ${units.force}`}
-      type="number"
-      min={0}
-      step="any"
-      inputMode="decimal"
-      defaultValue={run.tension === undefined ? '' : shown(run.tension)}
+    <ForceField
+      label="Tension"
+      hint={`left empty: the house’s ${writeForce(rules.tension, units.force)}`}
+      unit={units.force}
+      value={run.tension}
       disabled={!canEdit}
-      onBlur={(event) => keep(event.target.value, event.target.valueAsNumber)}
+      onChange={(tension) =>
+        actions.perform({
+          type: 'run.set',
+          id: run.id,
+          set: tension === undefined ? {} : { tension },
+          unset: tension === undefined ? ['tension'] : [],
+        })
+      }
     />
   )
 }

@@ -1,10 +1,11 @@
+import { ANGLE_AGREEMENT, angleDisagreement } from '@shared/calculation/stair-angle'
 import type { Bay } from '@shared/schemas/bay'
 import { toDegrees } from '@shared/units/angle'
 import { writeAngle } from '@shared/units/format-angle'
 import type { Length } from '@shared/units/length'
 import { ChoiceGroup } from '@/components/choices'
 import { FindingItem } from '@/components/finding-mark'
-import { TextField } from '@/components/field'
+import { NumberField } from '@/components/number-field'
 import { formatOf } from './format-of'
 import { MeasureField } from './measure-field'
 import type { PanelProps } from './selection-panel'
@@ -27,7 +28,7 @@ export function StairFields({ view, actions, bay }: PanelProps & { bay: Bay }) {
     })
   const computed =
     bay.rise !== undefined && bay.going !== undefined ? toDegrees(Math.atan2(bay.rise, bay.going)) : undefined
-  const off = computed !== undefined && bay.gauge !== undefined ? Math.abs(computed - bay.gauge) : 0
+  const apart = angleDisagreement(bay) ?? 0
   return (
     <div className="flex flex-col gap-3">
       <div className="grid grid-cols-3 gap-3">
@@ -45,20 +46,15 @@ export function StairFields({ view, actions, bay }: PanelProps & { bay: Bay }) {
           disabled={!canEdit}
           onChange={(value) => keep('going', value)}
         />
-        <TextField
-          key={bay.gauge ?? 'none'}
-          label="Gauge, °"
-          type="number"
+        <NumberField
+          label="Gauge"
+          unit="°"
           min={0}
           max={80}
-          step="any"
-          inputMode="decimal"
-          defaultValue={bay.gauge ?? ''}
+          value={bay.gauge}
           disabled={!canEdit}
-          onBlur={(event) => {
-            const given = event.target.value === '' ? undefined : event.target.valueAsNumber
-            const isFit = given === undefined || (given >= 0 && given <= 80)
-            if (isFit && given !== bay.gauge) keep('gauge', given)
+          onChange={(gauge) => {
+            if (gauge !== bay.gauge) keep('gauge', gauge)
           }}
         />
       </div>
@@ -67,11 +63,11 @@ export function StairFields({ view, actions, bay }: PanelProps & { bay: Bay }) {
           Rise and going make <span className="figures font-medium text-spruce">{writeAngle(computed)}</span>.
         </p>
       )}
-      {off > 1 ? (
+      {apart > ANGLE_AGREEMENT ? (
         <FindingItem
           finding={{
             level: 'check',
-            text: `Rise and going differ from the gauge by ${writeAngle(off)}. Rise and going are used; take the doubtful one again.`,
+            text: `Rise and going differ from the gauge by ${writeAngle(toDegrees(apart))}. Rise and going are used; take the doubtful one again.`,
           }}
         />
       ) : null}
