@@ -15,6 +15,8 @@ export default defineConfig({
           include: ['tests/{shared,src,scripts}/**/*.test.{ts,tsx}'],
           environment: 'node',
           setupFiles: ['tests/setup/strict.ts'],
+          // Properties try hundreds of surveys, and a busy machine takes its time.
+          testTimeout: 60_000,
         },
       },
       {

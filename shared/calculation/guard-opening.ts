@@ -27,6 +27,7 @@ export function guardOpening(guard: Guard, stairsOnly: boolean): Opening {
   const stairTop = stair?.topRailUnderside ?? (stair?.height && stair.height - RAIL_DEPTH)
   return {
     bottom: stair?.bottom ?? guard.bottom,
-    top: stairTop ?? guard.topRailUnderside ?? guard.height - RAIL_DEPTH,
+    // A guard lower than its own rail is no guard: the opening is nothing, not less.
+    top: Math.max(0, stairTop ?? guard.topRailUnderside ?? guard.height - RAIL_DEPTH),
   }
 }
