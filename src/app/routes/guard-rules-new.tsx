@@ -17,10 +17,8 @@ export function Component() {
   const navigate = useNavigate()
   const mayEdit = useMay('guard-rules:edit')
   const { data, error, isPending, refetch } = useQuery(guardRulesQuery)
-  const from = findRules(
-    search.get('from') ?? 'irc-2021',
-    data?.map(({ rules }) => rules),
-  )
+  const own = data?.map(({ rules }) => rules) ?? []
+  const from = findRules(search.get('from') ?? 'irc-2021', own)
   return (
     <Page title="Own guard rules" width="narrow" above={<Link to={paths.guardRules}>Guard rules</Link>}>
       {isPending ? <Loading what="the guard rules" /> : null}
@@ -34,7 +32,7 @@ export function Component() {
             authority having jurisdiction.
           </p>
           <GuardRulesForm
-            start={ownCopy(from)}
+            start={ownCopy(from, own)}
             onSaved={() => {
               sayDone('The guard rules are saved.')
               void navigate(paths.guardRules)
