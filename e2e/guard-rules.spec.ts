@@ -1,4 +1,4 @@
-import { expectSoundPage } from './support/page-checks'
+import { expectSoundPage, narrow } from './support/page-checks'
 import { importSurvey, registerByHand } from './support/register'
 import { expect, test } from './support/test'
 
@@ -51,4 +51,53 @@ test('an owner copies published rules, asks for more, and surveys are held to th
   await page.getByLabel('Id', { exact: true }).fill('irc-2021')
   await page.getByRole('button', { name: 'Save the guard rules' }).click()
   await expect(page.getByText('irc-2021 is the id of published rules').first()).toBeVisible()
+})
+
+test('own rules are chosen on the survey, and one gesture gives the guard their height', async ({
+  page,
+  watch,
+}) => {
+  watch.allowConsole(/Failed to load resource/)
+  test.setTimeout(240_000)
+  await narrow(page)
+  await registerByHand(page, 'Slate Quay')
+  await page.goto('/guard-rules/new?from=irc-2021')
+  const height = page.getByLabel('Height at least', { exact: true })
+  const save = page.getByRole('button', { name: 'Save the guard rules' })
+  await height.fill('0')
+  await save.click()
+  await expect(page.getByText('Write a length above zero.')).toBeVisible()
+  await expect(height).toBeFocused()
+  await height.fill('42')
+  await page.getByRole('link', { name: 'Guard rules' }).first().click()
+  await expect(page.getByText(/is not saved yet and would be lost/)).toBeVisible()
+  await page.getByRole('button', { name: 'Close toast' }).click()
+  await expect(height).toHaveValue('42"')
+  await save.click()
+  await expect(page.getByRole('link', { name: /, own 2021/ })).toBeVisible()
+
+  const survey = await importSurvey(page, {
+    survey: { ...deck.survey, guard: { ...deck.survey.guard, rules: 'irc-2021' } },
+  })
+  const tooLow = page.getByRole('listitem').filter({ hasText: 'the rules ask for 42 in' })
+  await page.goto(`${survey}?guard`)
+  const panel = page.getByRole('dialog', { name: 'Guard and units' })
+  await expect(panel.getByText('R312.1.2, read in the text')).toBeVisible()
+  await panel.getByLabel('Rules followed').selectOption({ label: 'International Residential Code, own 2021' })
+  await expect(panel.getByText(/^These rules ask for 42"/)).toBeVisible()
+  await expectSoundPage(page)
+  await panel.getByRole('button', { name: 'Close' }).click()
+  await expect(page.getByText('Saved')).toBeVisible()
+  await page.goto(`${survey}/findings`)
+  await expect(tooLow).toBeVisible()
+
+  await page.goto(`${survey}?guard`)
+  await panel.getByRole('button', { name: 'Make the guard 42" high' }).click()
+  await expect(panel.getByLabel('Height', { exact: true })).toHaveValue('42"')
+  await expect(panel.getByRole('button', { name: /^Make the guard/ })).toHaveCount(0)
+  await panel.getByRole('button', { name: 'Close' }).click()
+  await expect(page.getByText('Saved')).toBeVisible()
+  await page.goto(`${survey}/findings`)
+  await expect(page.getByRole('heading', { level: 1 })).toBeVisible()
+  await expect(tooLow).toHaveCount(0)
 })

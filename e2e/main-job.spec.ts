@@ -10,7 +10,20 @@ const feet = [
   { x: 0.25, y: 0.6 },
   { x: 0.5, y: 0.6 },
   { x: 0.75, y: 0.6 },
+] as const
+
+/**
+ * Worked out by hand: both bays 47 3/8 in at 33 in and 47 5/16 in at 3 in, a post of 3 1/2 in between them, cables at
+ * 2 7/8, 5 3/4 … 31 5/8 in. D = 2 · (47.3125 + 0.0625 · (h − 3) / 30) + 3.5; both sleeves end 3/4 in past the face, so
+ * base = D + 1.5. U = √(3 · (1/16)² + (1.4 mm)² + (1/16)² + 2 · (1/32)²) = 0.14358 in, 1.4 mm being the class II tape’s
+ * 0.7 mm for each bay. Rounded up to 1/16: cable 1 99.76806, 4 99.80399, 5 99.81598, 9 99.86389, 10 99.87587 in.
+ */
+const WORKED_OUT = [
+  ...Array.from({ length: 4 }, () => 99.8125),
+  ...Array.from({ length: 5 }, () => 99.875),
+  ...Array.from({ length: 2 }, () => 99.9375),
 ]
+const UPRIGHT = [1500, 2000]
 
 /** Keys a length in on the keypad: digits, then the fraction's key. */
 async function keyIn(page: Page, digits: string, fraction?: string): Promise<void> {
@@ -42,16 +55,24 @@ test('@phone from sign-in to a cut list that the shop can download, by touch alo
   await test.step('a photo that the phone stored lying on its side', async () => {
     await page.getByLabel('Choose file').setInputFiles('demo/photos/mill-stair.jpg')
     await expect(page.getByRole('application')).toBeVisible()
-    const picture = await page.request.get(
-      await page.evaluate(
+    const address = () =>
+      page.evaluate(
         () =>
           performance
             .getEntriesByType('resource')
             .map(({ name }) => name)
             .find((name) => name.includes('/picture')) ?? '',
-      ),
+      )
+    await expect.poll(address).not.toBe('')
+    // Stored 2000 by 1500 with orientation 6: upright it is taller than wide.
+    const size = await page.evaluate(
+      async (url) => {
+        const { width, height } = await createImageBitmap(await (await fetch(url)).blob())
+        return [width, height]
+      },
+      await address(),
     )
-    expect(picture.headers()['content-type']).toBe('image/jpeg')
+    expect(size).toEqual(UPRIGHT)
   })
 
   await test.step('three posts and two bays', async () => {
@@ -69,7 +90,10 @@ test('@phone from sign-in to a cut list that the shop can download, by touch alo
     await panel.getByText('Softwood', { exact: true }).tap()
     await panel.getByRole('button', { name: '4x4' }).tap()
     await panel.getByRole('button', { name: 'The same for the 2 posts without material' }).tap()
-    await page.goto(`${page.url().split('?')[0] ?? ''}?post=P3`)
+    await chooseTool(page, 'Select')
+    await page.getByRole('button', { name: 'Lower the panel' }).tap()
+    await tapCanvas(page, feet[2])
+    await page.getByRole('button', { name: 'Raise the panel' }).tap()
     await expect(panel.getByRole('heading', { name: 'Post P3' })).toBeVisible()
     await panel.getByText('Veneered', { exact: true }).tap()
     await panel.getByRole('group', { name: 'Core under the cover' }).getByText('Hardwood').tap()
@@ -113,6 +137,7 @@ test('@phone from sign-in to a cut list that the shop can download, by touch alo
     await page.getByRole('link', { name: 'XLSX' }).tap()
     const rows = await readCutListSheet(await readFile(await (await download).path()))
     expect(rows).toEqual(cuts)
+    expect([...rows.values()]).toEqual(WORKED_OUT)
   })
 })
 

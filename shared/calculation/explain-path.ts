@@ -2,13 +2,21 @@ import { toDegrees } from '../units/angle'
 import type { BayPath } from './bay-path'
 import type { CablePath, OverallPath, PathTerm } from './cable-path'
 import type { GapReadings } from './clear-length'
+import { holeHeights } from './hole-heights'
 import type { Figure, Phrase } from './phrase'
 import type { PostPath } from './post-path'
 import type { LimitLine, WorkingLine } from './working'
 
 /** The path of a cable, term by term. */
 export const explainPath = ({ terms }: CablePath, height: number): WorkingLine[] =>
-  terms.map((term) => ({ label: [termName(term)], value: term.value, reason: termReason(term, height) }))
+  terms.map((term, i) => ({
+    label: [termName(term)],
+    value: term.value,
+    reason: [
+      ...termReason(term, height),
+      ...(term.kind === 'post' ? holesPhrase(term, [terms[i - 1], terms[i + 1]], height) : []),
+    ],
+  }))
 
 function termName(term: PathTerm): string {
   if (term.kind === 'overall') return 'Overall reading'
@@ -66,6 +74,34 @@ function postReason({ post, size, factor }: PostPath): Phrase {
   ]
 }
 
+/** Where the hole of a post on a stair is to be drilled: lower on the downhill face, higher on the other. */
+function holesPhrase(
+  { size }: PostPath,
+  neighbours: readonly (PathTerm | undefined)[],
+  height: number,
+): Phrase {
+  const bays = neighbours.flatMap((term) => (term?.kind === 'bay' ? [term] : []))
+  const [before, after] = bays
+  if (!before || !after || (before.angle.angle === 0 && after.angle.angle === 0)) return []
+  if (before.angle.angle === after.angle.angle) {
+    const { lower, upper } = holeHeights(height, size, before.angle.angle)
+    return [
+      '. Its hole’s centre lies at ',
+      { length: lower },
+      ' on the downhill face, at ',
+      { length: upper },
+      ' on the other',
+    ]
+  }
+  const toward = ({ bay, angle }: BayPath): Phrase => {
+    const off = height - holeHeights(height, size, angle.angle).lower
+    return off === 0
+      ? [`toward bay ${bay.id} level`]
+      : [`toward bay ${bay.id} `, { length: off }, ' lower where that goes down, higher where it goes up']
+  }
+  return ['. Its hole’s centre lies ', ...toward(before), ', ', ...toward(after)]
+}
+
 /** The limits a path brings: one per reading, the tape's and the gauge's added up along the run. */
 export function explainPathLimits({ terms, tapeLimit, angleLimit }: CablePath): LimitLine[] {
   const readings = terms.map((term): LimitLine => ({
@@ -85,10 +121,18 @@ export function explainPathLimits({ terms, tapeLimit, angleLimit }: CablePath): 
     lines.push({ kind: 'tape', label: ['Tape'], value: tapeLimit, reason, onSite: false })
   }
   if (angleLimit > 0) {
-    const reason = ['one gauge, so its limits add up: ', ...sum(angled.map((term) => term.angleLimit))]
+    const reason = [`${angleSources(angled)}: `, ...sum(angled.map((term) => term.angleLimit))]
     lines.push({ kind: 'angle', label: ['Angle'], value: angleLimit, reason, onSite: false })
   }
   return lines
+}
+
+/** What the angles were taken with: all errors are taken to fall one way. */
+function angleSources(angled: readonly BayPath[]): string {
+  const gauged = angled.filter(({ angle }) => angle.source === 'gauge').length
+  if (gauged === angled.length) return 'one gauge, so its limits add up'
+  const what = gauged === 0 ? 'angles from rise and going' : 'angles from gauge and from rise and going'
+  return angled.length === 1 ? 'the angle from rise and going' : `${what}, whose limits add up along the run`
 }
 
 function readingLimitReason(term: PathTerm): Phrase {

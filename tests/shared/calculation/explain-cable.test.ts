@@ -121,7 +121,7 @@ describe('the working of other cables', () => {
     }
     expect(explain(given).path.map(line)).toEqual([
       'Bay B1: 75; 60 in at the top, at every height; taped level, it is divided by the cosine of 36.87° (from rise and going): times 1.25',
-      'Post P2: 4.375; passed on a slope: its size along, 3 1/2 in, times 1.25 (½ / cos before + ½ / cos after)',
+      'Post P2: 4.375; passed on a slope: its size along, 3 1/2 in, times 1.25 (½ / cos before + ½ / cos after). Its hole’s centre lies at 16 11/16 in on the downhill face, at 19 5/16 in on the other',
       'Bay B2: 75; 75 in at the top, at every height; taped along the slope of 36.87° (from rise and going), it counts as read',
     ])
     expect(explain(given).limits.map(({ kind }) => kind)).toEqual([
@@ -133,6 +133,29 @@ describe('the working of other cables', () => {
       'seat',
       'seat',
     ])
+  })
+
+  it('tells what the angles were taken with, and where the hole of a post between level and stair lies', () => {
+    const stair = { kind: 'stair', taped: 'level' }
+    const of = (first: Record<string, unknown>, second: Record<string, unknown>) =>
+      explain({
+        posts: [post('P1'), post('P2'), post('P3')],
+        bays: [bay('B1', ['P1', 'P2'], [60], first), bay('B2', ['P2', 'P3'], [60], second)],
+        fittings: [{ ...exampleFitting, maxAngle: 40 }],
+        rules: { maxBend: 45 },
+      })
+    const angleReason = (working: ReturnType<typeof of>) =>
+      text(working.limits.find(({ kind }) => kind === 'angle')?.reason)
+    const gauged = { ...stair, gauge: 30 }
+    const measured = { ...stair, rise: 30, going: 40 }
+    expect(angleReason(of(gauged, gauged))).toMatch(/^one gauge, so its limits add up: /)
+    expect(angleReason(of(measured, measured))).toMatch(/^angles from rise and going, whose limits add up/)
+    expect(angleReason(of(gauged, measured))).toMatch(/^angles from gauge and from rise and going/)
+    expect(angleReason(of({}, measured))).toMatch(/^the angle from rise and going: /)
+    // 1 3/4 in from centre line to face, times 3/4.
+    expect(line(of({}, measured).path[1]!)).toMatch(
+      /Its hole’s centre lies toward bay B1 level, toward bay B2 1 5\/16 in lower where that goes down/,
+    )
   })
 
   it('tells an overall reading and how often it was taken', () => {
