@@ -24,6 +24,9 @@ export function addFindingsSheet(workbook: Workbook, document: CutListDocument):
       { header: 'Code', value: ({ finding }) => finding.code, widest: 26 },
     ],
     lines,
-    closing: lines.length === 0 ? ['Nothing was noticed.'] : [],
+    closing: [
+      ...(lines.length === 0 ? ['Nothing was noticed.'] : []),
+      'Sections of guard rules are for orientation: confirm with the authority having jurisdiction.',
+    ],
   })
 }

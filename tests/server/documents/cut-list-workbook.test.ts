@@ -58,7 +58,7 @@ describe('the workbook of the worked example', () => {
 
   it('has findings as rows, or says that there is none', async () => {
     const none = (await readBack(cutListDocument(workedExample(), { findings: [] }))).get('Findings') ?? []
-    expect(none.at(-1)?.[0]).toBe('Nothing was noticed.')
+    expect(none.at(-2)?.[0]).toBe('Nothing was noticed.')
     const input = workedExample()
     input.survey.bays[1]!.readings = []
     const [, first] = (await readBack(cutListDocument(input))).get('Findings') ?? []

@@ -21,12 +21,17 @@ export function PanelFindings({ view, of }: PanelFindingsProps) {
   const findings = view.findings.filter((finding) => isAbout(finding, of))
   if (findings.length === 0) return null
   return (
-    <ul aria-label="Findings" className="flex flex-col gap-2">
-      {findings.map((finding) => (
-        <li key={finding.text}>
-          <FindingItem finding={finding} />
-        </li>
-      ))}
-    </ul>
+    <section aria-label="What was noticed here">
+      <ul aria-label="Findings" className="flex flex-col gap-2">
+        {findings.map((finding) => (
+          <li key={finding.text}>
+            <FindingItem finding={finding} />
+          </li>
+        ))}
+      </ul>
+      <p className="mt-2 text-sm text-soft">
+        Arithmetic on what was entered. Confirm with the authority having jurisdiction.
+      </p>
+    </section>
   )
 }
