@@ -121,13 +121,14 @@ function runOperations({ truth, cable, stoppedAt }: DemoVisit): SimpleOperation[
 }
 
 /** On a stair the guard stands lower, above the nosing line (IRC R312.1.2, exception 1). */
-const guardOperations = ({ taped }: DemoTruth): SimpleOperation[] =>
-  taped.stair
-    ? [
-        {
-          type: 'guard.set',
-          set: { stair: { height: inches(34), topRailUnderside: inches(32.5) } },
-          unset: [],
-        },
-      ]
-    : []
+const guardOperations = ({ taped, deckZ }: DemoTruth): SimpleOperation[] => [
+  {
+    type: 'guard.set',
+    set: {
+      fall: inches(deckZ),
+      railTies: true,
+      ...(taped.stair ? { stair: { height: inches(34), topRailUnderside: inches(32.5) } } : {}),
+    },
+    unset: [],
+  },
+]

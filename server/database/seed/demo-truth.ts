@@ -27,6 +27,8 @@ const truthSchema = z.object({
     depth: z.number(),
     cornersPx: z.tuple([pixels, pixels, pixels, pixels]),
   }),
+  /** Of the deck above the ground. */
+  deckZ: z.number(),
   taped: z.object({
     bays: z.array(z.object({ ...pair, kind: z.enum(['level', 'stair']), bottom: taped, top: taped })),
     overall: z.array(z.object({ run: z.string(), innerBottom: taped, innerTop: taped })),
