@@ -1,6 +1,7 @@
 import type { Finding } from '@shared/schemas/finding'
 import { FindingItem } from '@/components/finding-mark'
 import type { EditorView } from '../model/editor-context'
+import { doubtCodes } from './reading-doubts'
 
 /** Whether a finding is about what is in hand. */
 export function isAbout(
@@ -16,9 +17,9 @@ interface PanelFindingsProps {
   of: { kind: 'post' | 'bay' | 'run'; id: string }
 }
 
-/** What was noticed about what is in hand, the gravest first; nothing where nothing was. */
+/** What was noticed about what is in hand, the gravest first, beside what its readings say themselves. */
 export function PanelFindings({ view, of }: PanelFindingsProps) {
-  const findings = view.findings.filter((finding) => isAbout(finding, of))
+  const findings = view.findings.filter((finding) => isAbout(finding, of) && !doubtCodes.has(finding.code))
   if (findings.length === 0) return null
   return (
     <section aria-label="What was noticed here">

@@ -2,6 +2,7 @@ import { useState } from 'react'
 import type { Reading, ReadingPlace } from '@shared/schemas/bay'
 import type { ReadingOwner } from '@shared/survey/survey-operation'
 import { meanOfReadings } from '@shared/calculation/mean-of-readings'
+import { type LengthFormat, writeLength } from '@shared/units/format-length'
 import { Button } from '@/components/button'
 import { ChoiceGroup } from '@/components/choices'
 import { FindingItem } from '@/components/finding-mark'
@@ -9,7 +10,7 @@ import { TextField } from '@/components/field'
 import { Length } from '@/components/length'
 import { formatOf } from './format-of'
 import { Keypad } from './keypad/keypad'
-import { emptyEntry } from './keypad/entry'
+import { emptyEntry, readEntry } from './keypad/entry'
 import { newReading } from './new-reading'
 import { readingDoubts } from './reading-doubts'
 import type { PanelProps } from './selection-panel'
@@ -33,7 +34,10 @@ export function Readings({ view, actions, of, readings, onComplete }: ReadingsPr
   const [place, setPlace] = useState<ReadingPlace>(unread ?? 'top')
   const [entry, setEntry] = useState(emptyEntry)
   const format = formatOf(view)
-  const doubts = readingDoubts(readings, view)
+  const typed = readEntry(entry, view.units.length)
+  // What is keyed in is doubted before it is taken, not only after.
+  const inHand = typed?.ok && typed.length > 0 ? [{ id: 'in-hand', at: place, value: typed.length }] : []
+  const doubts = readingDoubts([...readings, ...inHand], view)
   const add = (value: Parameters<typeof newReading>[0]['value']) => {
     const reading = newReading({ at: place, value, by: view.person.name })
     actions.perform({ type: 'reading.add', of, reading })
@@ -54,6 +58,7 @@ export function Readings({ view, actions, of, readings, onComplete }: ReadingsPr
           format={format}
           fraction={view.fraction}
           enterLabel={`Add ${place}`}
+          mean={meanText(readings, { place, inHand, format })}
           beside={
             <ChoiceGroup
               label="Where the tape lies"
@@ -82,6 +87,16 @@ export function Readings({ view, actions, of, readings, onComplete }: ReadingsPr
       </ul>
     </div>
   )
+}
+
+/** The mean that the next reading would make, where there is one already. */
+function meanText(
+  readings: readonly Reading[],
+  { place, inHand, format }: { place: ReadingPlace; inHand: readonly Reading[]; format: LengthFormat },
+): string | undefined {
+  if (!meanOfReadings(readings, place)) return undefined
+  const read = meanOfReadings([...readings, ...inHand], place)
+  return read && `${place}: mean of ${read.count} is ${writeLength(read.mean, format)}`
 }
 
 const dayText = (on: string): string =>

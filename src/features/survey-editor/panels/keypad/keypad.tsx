@@ -18,6 +18,8 @@ interface KeypadProps {
   fraction: 16 | 32 | 64
   /** What the main key does: `Add top reading`. */
   enterLabel: string
+  /** The mean of what was read at this place, with what is keyed in. */
+  mean?: string | undefined
   /** What stands beside the figure: where the tape lies. */
   beside?: ReactNode
 }
@@ -26,14 +28,16 @@ const key =
   'flex min-h-14 min-w-0 items-center justify-center rounded border border-rule bg-paper text-lg font-medium active:bg-chalk-ground'
 
 /** A length by big keys or by keyboard; what was understood stands above, as large as anything near it. */
-export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, beside }: KeypadProps) {
+export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, mean, beside }: KeypadProps) {
   const id = useId()
   const isMetric = format.style === 'millimetres'
   const parsed = readEntry(entry, isMetric ? 'mm' : 'in')
-  const fault = parsed && (parsed.ok ? lengthFault(parsed.length) : parsed.message)
+  // A first zero is the beginning of 0.5 or 0 3/8, not yet a length of nothing.
+  const isBegun = /^0[.,]?$/.test(entryText(entry))
+  const fault = parsed && !isBegun ? (parsed.ok ? lengthFault(parsed.length) : parsed.message) : undefined
   const hit = (pressed: Key) => onEntry(press(entry, pressed))
   const enter = () => {
-    if (parsed?.ok && !fault) onEnter(parsed.length)
+    if (parsed?.ok && !fault && !isBegun) onEnter(parsed.length)
   }
   return (
     <div className="flex flex-col gap-2">
@@ -47,6 +51,7 @@ export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, 
           )}
         </div>
       </div>
+      {mean ? <p className="text-right text-sm text-soft">{mean}</p> : null}
       {fault ? (
         <p id={`${id}-fault`} role="alert" className="text-sm text-stop">
           {fault}
@@ -67,7 +72,7 @@ export function Keypad({ entry, onEntry, onEnter, format, fraction, enterLabel, 
             if (event.key === 'Enter') enter()
           }}
         />
-        <Button look="primary" disabled={!parsed?.ok || fault !== undefined} onClick={enter}>
+        <Button look="primary" disabled={!parsed?.ok || fault !== undefined || isBegun} onClick={enter}>
           {enterLabel}
         </Button>
       </div>
