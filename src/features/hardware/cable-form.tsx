@@ -7,6 +7,7 @@ import { inches } from '@shared/units/length'
 import { ChoiceGroup } from '@/components/choices'
 import { LengthField } from '@/components/length-field'
 import { NumberField } from '@/components/number-field'
+import { useAskBeforeLeaving } from '@/components/use-ask-before-leaving'
 import { useSaveCable } from './api/save-cable'
 import { cableWords } from './cable-words'
 import { ForceField } from '@/components/force-field'
@@ -35,7 +36,9 @@ const blank = (unit: Units['force']): Cable => ({
 })
 
 export function CableForm({ known, units, format, onSaved }: CableFormProps) {
-  const [cable, setCable] = useState<Cable>(known?.cable ?? blank(units.force))
+  const [begun] = useState<Cable>(known?.cable ?? blank(units.force))
+  const [cable, setCable] = useState(begun)
+  const goOn = useAskBeforeLeaving(cable !== begun)
   const { mutate, error, isPending } = useSaveCable(known?.key)
   const set = (fields: Partial<Cable>) => setCable((now) => ({ ...now, ...fields }))
   return (
@@ -43,7 +46,14 @@ export function CableForm({ known, units, format, onSaved }: CableFormProps) {
       saveLabel={known ? 'Save the cable' : 'Add the cable'}
       busy={isPending}
       error={error}
-      onSave={() => mutate(cable, { onSuccess: onSaved })}
+      onSave={() =>
+        mutate(cable, {
+          onSuccess: () => {
+            goOn()
+            onSaved()
+          },
+        })
+      }
     >
       <NameFields value={cable} isKnown={known !== undefined} error={error} onChange={set} />
       <ChoiceGroup

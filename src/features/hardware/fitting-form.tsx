@@ -7,6 +7,7 @@ import { ChoiceGroup } from '@/components/choices'
 import { ForceField } from '@/components/force-field'
 import { LengthField } from '@/components/length-field'
 import { NumberField } from '@/components/number-field'
+import { useAskBeforeLeaving } from '@/components/use-ask-before-leaving'
 import { useSaveFitting } from './api/save-fitting'
 import { FittingDrawing } from './fitting-drawing'
 import { type CableChoice, FittingUses } from './fitting-uses'
@@ -43,9 +44,9 @@ const blank: Fitting = {
 const mounts = (['drilled', 'surface'] as const).map((value) => ({ value, label: mountWords[value].long }))
 
 export function FittingForm({ known, cables, format, force, onSaved }: FittingFormProps) {
-  const [fitting, setFitting] = useState<Fitting>(
-    known?.fitting ?? { ...blank, cables: cables.map(({ id }) => id) },
-  )
+  const [start] = useState<Fitting>(known?.fitting ?? { ...blank, cables: cables.map(({ id }) => id) })
+  const [fitting, setFitting] = useState(start)
+  const goOn = useAskBeforeLeaving(fitting !== start)
   const { mutate, error, isPending } = useSaveFitting(known?.key)
   const set = (fields: Partial<Fitting>) => setFitting((now) => ({ ...now, ...fields }))
   return (
@@ -53,7 +54,14 @@ export function FittingForm({ known, cables, format, force, onSaved }: FittingFo
       saveLabel={known ? 'Save the fitting' : 'Add the fitting'}
       busy={isPending}
       error={error}
-      onSave={() => mutate(fitting, { onSuccess: onSaved })}
+      onSave={() =>
+        mutate(fitting, {
+          onSuccess: () => {
+            goOn()
+            onSaved()
+          },
+        })
+      }
     >
       <NameFields value={fitting} isKnown={known !== undefined} error={error} onChange={set} />
       <ChoiceGroup

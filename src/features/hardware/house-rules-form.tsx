@@ -4,6 +4,7 @@ import type { HouseRules } from '@shared/schemas/house-rules'
 import { Button } from '@/components/button'
 import { Card } from '@/components/page'
 import { sayDone } from '@/components/toast'
+import { useAskBeforeLeaving } from '@/components/use-ask-before-leaving'
 import { useSaveHouseRules } from './api/save-house-rules'
 import { LumberRules } from './lumber-rules'
 import { RuleField } from './rule-field'
@@ -21,6 +22,7 @@ export function HouseRulesForm({ rules: saved, units }: HouseRulesFormProps) {
   // Fields begin anew when all of them are set at once, so that nothing half typed stays in one.
   const [begun, setBegun] = useState(0)
   const { mutate, error, isPending } = useSaveHouseRules()
+  useAskBeforeLeaving(JSON.stringify(rules) !== JSON.stringify(saved))
   const setAll = (values: HouseRules) => {
     setRules(values)
     setBegun((times) => times + 1)
