@@ -82,8 +82,14 @@ function openingFindings(bay: BayCheck, { guard }: BayContext): Notice[] {
   ]
 }
 
-/** The sphere above the highest cable: a larger one where the rules allow it and all of the opening lies there. */
-function topSphere({ sphere, isStair, openings }: BayCheck, { guard, rules }: GuardFigures): number {
+/**
+ * The sphere that must not pass above the highest cable: a larger one where the rules allow it and all of the opening
+ * lies there.
+ *
+ * Units: nm.
+ * Source: section 8 of the calculation; the guard rules' own section for the larger sphere.
+ */
+export function topSphere({ sphere, isStair, openings }: BayCheck, { guard, rules }: GuardFigures): number {
   const upper = rules?.upperSphere
   if (!upper || isStair || guard.sphere !== undefined) return sphere
   return exceeds(upper.above, openings.highest) ? sphere : upper.value
