@@ -47,7 +47,7 @@ function Checks({ loaded, note }: { loaded: Loaded; note: ReactNode }) {
         </>
       }
       actions={
-        <>
+        <div className="contents print:hidden">
           <ButtonLink to={paths.survey(record.id)}>Survey</ButtonLink>
           <ButtonLink to={paths.findings(record.id)}>Findings</ButtonLink>
           <a
@@ -57,7 +57,7 @@ function Checks({ loaded, note }: { loaded: Loaded; note: ReactNode }) {
           >
             Guard summary, PDF
           </a>
-        </>
+        </div>
       }
     >
       {note}

@@ -29,7 +29,7 @@ export function BayPicture({ format, holds, ...drawn }: BayPictureProps) {
       {shape.posts.map((post, i) => (
         <path key={i} d={pathOf(post, true)} className="fill-paper stroke-ink" strokeWidth="1" />
       ))}
-      <path d={pathOf(shape.rail, true)} className="fill-rule stroke-ink" strokeWidth="1" />
+      <path d={pathOf(shape.rail, true)} className="fill-rule stroke-ink print:fill-paper" strokeWidth="1" />
       {shape.sill ? <Line line={shape.sill} className="stroke-ink" width={2} /> : null}
       {shape.nosings ? <Line line={shape.nosings} className="stroke-ink" width={0.8} dashes="5 3" /> : null}
       {shape.spacers.map((line, i) => (

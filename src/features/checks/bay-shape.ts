@@ -122,7 +122,7 @@ const raised = ({ x, y }: Spot): Spot => ({ x, y: y - OFF })
 
 /** Where along the bay each opening is measured, as shares: apart, so that their figures do not meet. */
 const levelPlaces: Record<GapName, number> = { bottom: 0.12, between: 0.42, top: 0.72 }
-const stairPlaces: Record<GapName, number> = { top: 0.16, between: 0.62, bottom: 0.92 }
+const stairPlaces: Record<GapName, number> = { top: 0.55, between: 0.62, bottom: 0.92 }
 
 /** The openings with their dimension lines; the sphere goes in the widest between cables, and where it is worse. */
 function gapsOf({ bay, run, diameter, topSphere }: BayDrawn, { at, scale, across }: Frame): Gap[] {

@@ -71,17 +71,37 @@ function StaggerStrip({ corner, format }: { corner: CornerCheck; format: LengthF
       viewBox={`0 0 ${shape.width} ${shape.height.toFixed(2)}`}
       className="w-full max-w-72 rounded border border-rule bg-card"
     >
-      <Rect box={shape.face} className="fill-rule stroke-ink" />
+      <Rect box={shape.face} className="fill-rule stroke-ink print:fill-paper" />
       <Rect box={shape.a} className="fill-none stroke-spruce [stroke-dasharray:4_3]" />
       {isRound ? (
         <circle {...round} className="fill-card stroke-chalk print:stroke-ink" strokeWidth="1.5" />
       ) : (
         <Rect box={box} className="fill-none stroke-chalk [stroke-dasharray:4_3] print:stroke-ink" />
       )}
+      <Name x={shape.a.x + 6} y={shape.a.y + shape.a.height + 14} text={a.run} className="fill-spruce" />
+      <Name
+        x={shape.b.x + shape.b.width + 5}
+        y={shape.b.y + shape.b.height / 2 + 4.5}
+        text={isRound ? b.run : ''}
+        className="fill-chalk print:fill-ink"
+      />
       <Dimension line={shape.apart} label={needed} at={shape.label} />
     </svg>
   )
 }
+
+interface NameProps {
+  x: number
+  y: number
+  text: string
+  className: string
+}
+
+const Name = ({ x, y, text, className }: NameProps) => (
+  <text x={x} y={y} className={`${className} font-condensed text-sm font-semibold`}>
+    {text}
+  </text>
+)
 
 /** Thinner than this nothing is seen, nm. */
 const TOUCHING = 1e5

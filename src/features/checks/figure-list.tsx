@@ -20,7 +20,7 @@ export const FigureList = ({ lines }: { lines: readonly FigureLine[] }) => (
         <dd className="figures flex flex-wrap items-center gap-2 text-lg text-spruce">
           {value}
           {verdict === 'holds' ? <span className="text-sm font-medium text-soft">holds</span> : null}
-          {verdict && verdict !== 'holds' ? <FindingMark level={verdict} /> : null}
+          {verdict && verdict !== 'holds' ? <FindingMark level={verdict} className="print:text-ink" /> : null}
         </dd>
         {note ? <dd className="text-sm text-soft">{note}</dd> : null}
       </div>

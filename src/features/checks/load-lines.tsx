@@ -96,7 +96,8 @@ export function wireLines(
     {
       label: 'Wire table: deflection under 2 kg',
       value: most.value,
-      note: `${most.note} At most, to prove the tension.`,
+      note:
+        wire.mostDeflection.found === 'value' ? `${most.note} At most this proves the tension.` : most.note,
     },
   ]
 }

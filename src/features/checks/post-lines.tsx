@@ -45,7 +45,10 @@ function supportLine(
   return {
     label: `${supportWords[support]}${counts ? ': this one counts' : ', for comparison'}`,
     value: stress === undefined ? figures.moment(moment) : figures.stress(stress),
-    note: `moment ${figures.moment(moment)}${gives}.${counts ? ` ${assumptions[check.support ?? 'unknown']}` : ''}`,
+    note: [
+      ...(stress === undefined ? ['Moment alone.'] : [`moment ${figures.moment(moment)}${gives}.`]),
+      ...(counts ? [assumptions[check.support ?? 'unknown']] : []),
+    ].join(' '),
     verdict: judged ? verdictOf(found, 'post-overstressed') : undefined,
   }
 }

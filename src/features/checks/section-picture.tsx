@@ -30,7 +30,9 @@ export function SectionPicture({ shape, said, names = [], back, edge }: SectionP
       <Rect
         box={core}
         className={
-          core.width < post.width ? 'fill-rule stroke-ink [stroke-dasharray:3_2]' : 'fill-rule stroke-ink'
+          core.width < post.width
+            ? 'fill-rule stroke-ink [stroke-dasharray:3_2] print:fill-paper'
+            : 'fill-rule stroke-ink print:fill-paper'
         }
       />
       {fittings.map((fitting, i) => (
