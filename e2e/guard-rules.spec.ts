@@ -16,7 +16,7 @@ const deck = {
   },
 }
 
-test('an owner copies published rules, asks for more, and surveys are held to that', async ({
+test('@desk an owner copies published rules, asks for more, and surveys are held to that', async ({
   page,
   watch,
 }) => {
@@ -53,7 +53,7 @@ test('an owner copies published rules, asks for more, and surveys are held to th
   await expect(page.getByText('irc-2021 is the id of published rules').first()).toBeVisible()
 })
 
-test('own rules are chosen on the survey, and one gesture gives the guard their height', async ({
+test('@phone own rules are chosen on the survey, and one gesture gives the guard their height', async ({
   page,
   watch,
 }) => {
