@@ -28,6 +28,9 @@ test('@phone a stop leads to its bay, is cured there and is gone from the list',
   const found = page.getByRole('listitem').filter({ hasText: stop })
   await expect(found).toContainText('International Residential Code 2021, R312.1.3')
   await expectSoundPage(page)
+  await page.getByText('Checks (0)', { exact: true }).tap()
+  await expect(page.getByText('No check: nothing noticed needs a look')).toBeVisible()
+  await page.getByText(/^All \(/).tap()
   // Only an owner or estimator lets a stop pass.
   await expect(page.getByRole('button', { name: 'Overrule' })).toHaveCount(0)
 
@@ -63,10 +66,47 @@ test('@desk an estimator lets a stop pass with a reason, and makes it stand agai
   await expect(page.getByRole('listitem').filter({ hasText: stop })).toContainText(
     'A glass panel stands behind it',
   )
+  // On the survey's screen it says the same, and of the two stops only the other still counts.
+  await page.goto(`${survey}?bay=B1`)
+  const panel = page.getByRole('list', { name: 'Findings' })
+  await expect(panel.getByRole('listitem').filter({ hasText: stop })).toContainText('Overruled by')
+  await page.getByRole('button', { name: 'More of this survey' }).click()
+  await expect(page.getByRole('menuitem', { name: 'Findings (1 stop)' })).toBeVisible()
   await page.goto(`${survey}/findings`)
   await found.getByRole('button', { name: 'Make it stand again' }).click()
   await expect(found.getByRole('button', { name: 'Overrule', exact: true })).toBeVisible()
   await expect(found).not.toContainText('A glass panel')
+})
+
+test('@desk a reason is kept on the screen when somebody else changed the survey meanwhile', async ({
+  page,
+  context,
+  watch,
+}) => {
+  test.setTimeout(120_000)
+  watch.allowConsole(/409/)
+  await signInByHand(page, demoSignIn('estimator'))
+  const survey = await importSurvey(page, wideOpening)
+  await page.goto(`${survey}/findings`)
+  const found = page.getByRole('listitem').filter({ hasText: stop })
+  await found.getByRole('button', { name: 'Overrule' }).click()
+  await found.getByLabel('Why may it pass?').fill('A glass panel stands behind it')
+
+  const other = await context.newPage()
+  await other.goto(`${survey}/findings`)
+  const foundThere = other.getByRole('listitem').filter({ hasText: stop })
+  await foundThere.getByRole('button', { name: 'Overrule' }).click()
+  await foundThere.getByLabel('Why may it pass?').fill('Too early')
+  await foundThere.getByRole('button', { name: 'Overrule this stop' }).click()
+  await foundThere.getByRole('button', { name: 'Make it stand again' }).click()
+  await expect(foundThere.getByRole('button', { name: 'Overrule', exact: true })).toBeVisible()
+
+  await found.getByRole('button', { name: 'Overrule this stop' }).click()
+  await expect(page.getByText('Somebody changed the survey meanwhile')).toBeVisible()
+  await expect(found.getByLabel('Why may it pass?')).toHaveValue('A glass panel stands behind it')
+  await found.getByRole('button', { name: 'Overrule this stop' }).click()
+  await expect(found).toContainText('Overruled by')
+  await expect(found).toContainText('A glass panel stands behind it')
 })
 
 test('the checks show the figures an inspector asks for, to scale', async ({ page }) => {

@@ -14,10 +14,12 @@ export function useOverruler({ id, revision }: SurveyRecord): Overruler | undefi
   const queries = useQueryClient()
   const { person } = useSession()
   const may = useMay('finding:overrule')
-  const send = async (operation: SurveyOperation) => {
+  const send = async (operation: SurveyOperation): Promise<boolean> => {
+    let kept = true
     try {
       await changeSurvey(id, { revision, changes: [{ id: crypto.randomUUID(), operation }] })
     } catch (error) {
+      kept = false
       sayProblem(
         error instanceof ApiError && error.code === 'survey-moved'
           ? 'Somebody changed the survey meanwhile. It was read again: look whether the stop is still the same, and try once more.'
@@ -25,6 +27,7 @@ export function useOverruler({ id, revision }: SurveyRecord): Overruler | undefi
       )
     }
     await queries.invalidateQueries({ queryKey: surveyQuery(id).queryKey })
+    return kept
   }
   if (!may) return undefined
   return {

@@ -1,6 +1,6 @@
 import { lazy, Suspense, useEffect, useEffectEvent, useState, useSyncExternalStore } from 'react'
 import { useSearchParams } from 'react-router-dom'
-import type { Finding } from '@shared/schemas/finding'
+import { standingStops } from '@shared/survey/overrule'
 import { Sheet } from '@/components/sheet'
 import { Loading } from '@/components/states'
 import { sayDone, sayProblem } from '@/components/toast'
@@ -54,7 +54,7 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
         onHistory={() => go(paths.surveyHistory(record.id))}
         onCutList={toCutList}
         onFindings={() => go(paths.findings(record.id))}
-        found={foundText(view.findings)}
+        found={foundText(view)}
         onSettings={() => setSheet('settings')}
         onKeys={() => setSheet('keys')}
         onRemovePhoto={
@@ -88,10 +88,14 @@ export function SurveyScreen({ loaded }: { loaded: Loaded }) {
   )
 }
 
-/** What is to be looked at, in brackets behind a name; nothing where there is nothing. */
-function foundText(findings: readonly Finding[]): string {
+/** What is to be looked at, in brackets behind a name; nothing where there is nothing or all was let pass. */
+function foundText({ survey, findings }: SurveySession['view']): string {
+  const counts = {
+    stop: standingStops(survey, findings).length,
+    check: findings.filter(({ level }) => level === 'check').length,
+  }
   const parts = (['stop', 'check'] as const).flatMap((level) => {
-    const count = findings.filter((finding) => finding.level === level).length
+    const count = counts[level]
     return count === 0 ? [] : [`${count} ${level}${count === 1 ? '' : 's'}`]
   })
   return parts.length === 0 ? '' : ` (${parts.join(', ')})`

@@ -4,13 +4,22 @@ import { ChoiceGroup } from '@/components/choices'
 import { FindingMark } from '@/components/finding-mark'
 import { EmptyState } from '@/components/states'
 
-const words: Record<FindingLevel, { title: string; meaning: string }> = {
+const words: Record<FindingLevel, { title: string; meaning: string; none: string }> = {
   stop: {
     title: 'Stops',
     meaning: 'The work does not go on like this, unless an owner or estimator lets it pass.',
+    none: 'No stop: nothing noticed holds the work back.',
   },
-  check: { title: 'Checks', meaning: 'Somebody should look at these before the work goes on.' },
-  note: { title: 'Notes', meaning: 'Good to know; nothing to be done.' },
+  check: {
+    title: 'Checks',
+    meaning: 'Somebody should look at these before the work goes on.',
+    none: 'No check: nothing noticed needs a look before the work goes on.',
+  },
+  note: {
+    title: 'Notes',
+    meaning: 'Good to know; nothing to be done.',
+    none: 'No note: nothing else was noticed.',
+  },
 }
 /** The gravest first. */
 const levels = [...findingLevels].reverse()
@@ -39,6 +48,7 @@ export function FindingLevels({ findings, show }: FindingLevelsProps) {
   return (
     <div className="flex flex-col gap-6">
       <ChoiceGroup label="Show" quiet choices={choices} value={shown} onChange={setShown} />
+      {shown !== 'all' && of(shown).length === 0 ? <p>{words[shown].none}</p> : null}
       {levels
         .filter((level) => (shown === 'all' || shown === level) && of(level).length > 0)
         .map((level) => (

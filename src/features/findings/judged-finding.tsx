@@ -3,14 +3,14 @@ import type { Finding } from '@shared/schemas/finding'
 import { mayBeOverruled, type Overruling } from '@shared/survey/overrule'
 import { Button } from '@/components/button'
 import { FindingItem } from '@/components/finding-mark'
-import { momentText } from '@/lib/date-text'
+import { OverrulingText } from '@/components/overruling-text'
 import { OverruleForm } from './overrule-form'
 
 export interface Overruler {
-  /** Lets a stop pass, with its reason; resolves once it is kept. */
-  overrule: (finding: Finding, reason: string) => Promise<void>
-  /** Makes it stand again. */
-  uphold: (finding: Finding) => Promise<void>
+  /** Lets a stop pass, with its reason. @returns whether that was kept; if not, why was said */
+  overrule: (finding: Finding, reason: string) => Promise<boolean>
+  /** Makes it stand again. @returns whether that was kept; if not, why was said */
+  uphold: (finding: Finding) => Promise<boolean>
 }
 
 interface JudgedFindingProps {
@@ -33,8 +33,8 @@ export function JudgedFinding({ finding, overruling, overruler, goThere }: Judge
         asking ? (
           <OverruleForm
             onOverrule={async (reason) => {
-              await overruler.overrule(finding, reason)
-              setAsking(false)
+              // A reason that could not be kept stays on the screen, to be sent again.
+              if (await overruler.overrule(finding, reason)) setAsking(false)
             }}
             onCancel={() => setAsking(false)}
           />
@@ -50,7 +50,7 @@ export function JudgedFinding({ finding, overruling, overruler, goThere }: Judge
   )
 }
 
-function BusyButton({ onPress, children }: { onPress: () => Promise<void>; children: ReactNode }) {
+function BusyButton({ onPress, children }: { onPress: () => Promise<unknown>; children: ReactNode }) {
   const [busy, setBusy] = useState(false)
   return (
     <Button
@@ -64,15 +64,5 @@ function BusyButton({ onPress, children }: { onPress: () => Promise<void>; child
     >
       {children}
     </Button>
-  )
-}
-
-function OverrulingText({ overruling: { overrule, stands } }: { overruling: Overruling }) {
-  const who = `${overrule.by ?? 'somebody unnamed'}${overrule.on ? `, ${momentText(overrule.on)}` : ''}`
-  return (
-    <p className="mt-2 text-sm">
-      <strong className="font-medium">{stands ? 'Overruled' : 'Was overruled'}</strong> by {who}: “
-      {overrule.reason}”{stands ? null : ' That was with other numbers, and counts no more.'}
-    </p>
   )
 }

@@ -2,6 +2,7 @@ import type { Bay } from '@shared/schemas/bay'
 import type { Finding, FindingLevel } from '@shared/schemas/finding'
 import type { Survey } from '@shared/schemas/survey'
 import { meanOfReadings } from '@shared/calculation/mean-of-readings'
+import { overrulingOf } from '@shared/survey/overrule'
 import { type LengthFormat, writeLength } from '@shared/units/format-length'
 
 /** What stands beside a bay or a post on the photo. */
@@ -33,9 +34,12 @@ const graver = (a: FindingLevel | null | undefined, b: FindingLevel): FindingLev
 export function captionsOf(survey: Survey, findings: readonly Finding[], format: LengthFormat): Captions {
   const ofBays = new Map<string, FindingLevel>()
   const posts = new Map<string, FindingLevel>()
-  for (const { level, where, code } of findings) {
+  for (const finding of findings) {
+    const { level, where, code } = finding
     // What is only missing yet shows as a dashed line or in *next missing*; a shape is for what is to be looked at.
     if (missing.has(code) || level === 'note') continue
+    // A stop that was let pass as it is calls nobody any more.
+    if (overrulingOf(survey, finding)?.stands) continue
     if (where.bay) ofBays.set(where.bay, graver(ofBays.get(where.bay), level))
     else if (where.post) posts.set(where.post, graver(posts.get(where.post), level))
   }

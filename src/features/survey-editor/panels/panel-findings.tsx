@@ -1,5 +1,7 @@
 import type { Finding } from '@shared/schemas/finding'
+import { overrulingOf } from '@shared/survey/overrule'
 import { FindingItem } from '@/components/finding-mark'
+import { OverrulingText } from '@/components/overruling-text'
 import type { EditorView } from '../model/editor-context'
 import { doubtCodes } from './reading-doubts'
 
@@ -24,11 +26,16 @@ export function PanelFindings({ view, of }: PanelFindingsProps) {
   return (
     <section aria-label="What was noticed here">
       <ul aria-label="Findings" className="flex flex-col gap-2">
-        {findings.map((finding) => (
-          <li key={finding.text}>
-            <FindingItem finding={finding} />
-          </li>
-        ))}
+        {findings.map((finding) => {
+          const overruling = overrulingOf(view.survey, finding)
+          return (
+            <li key={finding.text}>
+              <FindingItem finding={finding} muted={overruling?.stands === true}>
+                {overruling ? <OverrulingText overruling={overruling} /> : null}
+              </FindingItem>
+            </li>
+          )
+        })}
       </ul>
       <p className="mt-2 text-sm text-soft">
         Arithmetic on what was entered. Confirm with the authority having jurisdiction.

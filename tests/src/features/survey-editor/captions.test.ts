@@ -30,4 +30,19 @@ describe('captionsOf', () => {
     expect(captions.bays.get('B1')?.level).toBe('check')
     expect(captions.posts.get('P2')).toBe('stop')
   })
+
+  it('leaves out a stop that was overruled as it is, and keeps one overruled with other numbers', () => {
+    const stop = {
+      level: 'stop',
+      code: 'opening-between',
+      where: { bay: 'B1' },
+      text: 'It is 5 in.',
+    } as const
+    const levelWith = (text: string) => {
+      const overruled = [{ code: stop.code, where: stop.where, text, reason: 'A panel stands behind it' }]
+      return captionsOf({ ...survey([bay]), overruled }, [stop], format).bays.get('B1')?.level
+    }
+    expect(levelWith('It is 5 in.')).toBeNull()
+    expect(levelWith('It is 6 in.')).toBe('stop')
+  })
 })
