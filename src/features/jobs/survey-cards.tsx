@@ -7,6 +7,7 @@ interface SurveyCardsProps {
   paths: {
     survey: (id: string) => string
     cutList: (id: string) => string
+    findings: (id: string) => string
     surveyTable: (id: string) => string
   }
   /** Address of the survey file. */
@@ -47,6 +48,9 @@ export function SurveyCards({ surveys, thumbnailOf, paths, fileOf, onRemove }: S
                 </ButtonLink>
                 <ButtonLink to={paths.cutList(id)} aria-label={`Cut list of ${title}`}>
                   Cut list
+                </ButtonLink>
+                <ButtonLink to={paths.findings(id)} look="quiet" aria-label={`Findings of ${title}`}>
+                  Findings
                 </ButtonLink>
                 <ButtonLink to={paths.surveyTable(id)} look="quiet" aria-label={`Table of ${title}`}>
                   Table
