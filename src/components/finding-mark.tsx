@@ -29,7 +29,10 @@ export function FindingMark({ level, className }: { level: FindingLevel; classNa
   )
 }
 
-/** A finding as a line of a list, with a way to where it is. */
+/** A mixed number stays on one line: torn apart, 4 27/32 would be read as 4. */
+const unbroken = (text: string): string => text.replace(/(\d) (\d+\/\d)/g, '$1\u00a0$2')
+
+/** A finding as a line of a list, with a way to where it is: beside it, on a phone below it. */
 export function FindingItem({
   finding,
   action,
@@ -45,17 +48,17 @@ export function FindingItem({
   return (
     <div
       className={classes(
-        'flex items-start gap-3 rounded border p-3',
+        'grid grid-cols-[auto_minmax(0,1fr)] items-start gap-x-3 rounded border p-3 sm:grid-cols-[auto_minmax(0,1fr)_auto]',
         muted ? 'border-rule bg-card' : grounds[finding.level],
       )}
     >
       <FindingMark level={finding.level} className="mt-0.5" />
-      <div className="min-w-0 flex-1">
-        <p className="text-base">{finding.text}</p>
+      <div>
+        <p className="text-base">{unbroken(finding.text)}</p>
         {finding.rule ? <p className="mt-1 text-sm text-soft">{finding.rule}</p> : null}
         {children}
       </div>
-      {action}
+      {action ? <div className="col-start-2 -ml-4 sm:col-start-3 sm:ml-0">{action}</div> : null}
     </div>
   )
 }
