@@ -17,6 +17,8 @@ export function Menu({ trigger, children }: MenuProps) {
           align="end"
           sideOffset={6}
           collisionPadding={8}
+          // A notice that goes away gives the focus back to where it was; that is no wish to close the menu.
+          onFocusOutside={(event) => event.preventDefault()}
           className="z-50 min-w-56 rounded border border-rule bg-card p-1 shadow-float"
         >
           {children}
